@@ -8,8 +8,8 @@ export interface Actor {
   email: string;
   timeZone: string;
   isOwner: boolean;
-  /** Their role in each production they belong to, by production id. */
-  roles: ReadonlyMap<string, Role>;
+  /** Their role in each production they belong to, by production id; null where they are there as the studio's owner alone. */
+  roles: ReadonlyMap<string, Role | null>;
 }
 
 /** What every verb is handed: the database, who asks, and which request it is. */

@@ -1,5 +1,15 @@
 import { sql } from "drizzle-orm";
-import { bigint, check, foreignKey, integer, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
+import {
+  bigint,
+  check,
+  foreignKey,
+  integer,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { fileKinds, receiptKinds, verdictKinds } from "../enums";
 import { at, id, now, sha256 } from "./columns";
 import { people } from "./people";
@@ -32,7 +42,10 @@ export const deliveries = pgTable(
   (table) => [
     unique("deliveries_number").on(table.productionId, table.number),
     unique("deliveries_in_production").on(table.id, table.productionId),
-    check("deliveries_published_whole", sql`${table.publishedAt} is null or ${table.manifestDigest} is not null`),
+    check(
+      "deliveries_published_whole",
+      sql`${table.publishedAt} is null or ${table.manifestDigest} is not null`,
+    ),
   ],
 );
 
@@ -51,8 +64,14 @@ export const deliveryItems = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.deliveryId, table.versionId] }),
-    foreignKey({ columns: [table.deliveryId, table.productionId], foreignColumns: [deliveries.id, deliveries.productionId] }),
-    foreignKey({ columns: [table.versionId, table.productionId], foreignColumns: [versions.id, versions.productionId] }),
+    foreignKey({
+      columns: [table.deliveryId, table.productionId],
+      foreignColumns: [deliveries.id, deliveries.productionId],
+    }),
+    foreignKey({
+      columns: [table.versionId, table.productionId],
+      foreignColumns: [versions.id, versions.productionId],
+    }),
     foreignKey({
       name: "delivery_items_signed_verdict",
       columns: [table.verdictId, table.versionId, table.digest, table.verdictKind],
@@ -76,7 +95,10 @@ export const deliveryFiles = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.deliveryId, table.path] }),
-    foreignKey({ columns: [table.deliveryId, table.versionId], foreignColumns: [deliveryItems.deliveryId, deliveryItems.versionId] }),
+    foreignKey({
+      columns: [table.deliveryId, table.versionId],
+      foreignColumns: [deliveryItems.deliveryId, deliveryItems.versionId],
+    }),
     foreignKey({
       name: "delivery_files_exact",
       columns: [table.versionId, table.frame, table.kind, table.sha256],
@@ -98,7 +120,10 @@ export const deliveryDocuments = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.deliveryId, table.path] }),
-    check("delivery_documents_sha256", sql`${table.sha256} = encode(sha256(convert_to(${table.body}, 'UTF8')), 'hex')`),
+    check(
+      "delivery_documents_sha256",
+      sql`${table.sha256} = encode(sha256(convert_to(${table.body}, 'UTF8')), 'hex')`,
+    ),
   ],
 );
 
@@ -129,7 +154,12 @@ export const downloads = pgTable(
     startedAt: now("started_at"),
     finishedAt: at("finished_at"),
   },
-  (table) => [foreignKey({ columns: [table.deliveryId, table.personId], foreignColumns: [recipients.deliveryId, recipients.personId] })],
+  (table) => [
+    foreignKey({
+      columns: [table.deliveryId, table.personId],
+      foreignColumns: [recipients.deliveryId, recipients.personId],
+    }),
+  ],
 );
 
 /** The client's signed word. Insert-only, one from each recipient. */
@@ -146,7 +176,10 @@ export const receipts = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.deliveryId, table.personId] }),
-    foreignKey({ columns: [table.deliveryId, table.personId], foreignColumns: [recipients.deliveryId, recipients.personId] }),
+    foreignKey({
+      columns: [table.deliveryId, table.personId],
+      foreignColumns: [recipients.deliveryId, recipients.personId],
+    }),
     check("receipts_kind", sql`${table.kind} in ('received', 'refused')`),
   ],
 );

@@ -1,5 +1,16 @@
 import { sql } from "drizzle-orm";
-import { bigint, bigserial, check, index, integer, jsonb, pgTable, text, unique, uuid } from "drizzle-orm/pg-core";
+import {
+  bigint,
+  bigserial,
+  check,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { outboxKinds } from "../enums";
 import { at, id, now, sha256 } from "./columns";
 import { people } from "./people";
@@ -24,7 +35,10 @@ export const events = pgTable(
     previous: sha256("previous").notNull().default(""),
     hash: sha256("hash").notNull().default(""),
   },
-  (table) => [unique("events_chain").on(table.chain, table.seq), index("events_production_at").on(table.productionId, table.at)],
+  (table) => [
+    unique("events_chain").on(table.chain, table.seq),
+    index("events_production_at").on(table.productionId, table.at),
+  ],
 );
 
 /** What must leave the house because of a committed change: mail to send, jobs to enqueue. One row per cause, by key. */
@@ -43,7 +57,9 @@ export const outbox = pgTable(
     doneAt: at("done_at"),
   },
   (table) => [
-    index("outbox_waiting").on(table.dueAt).where(sql`${table.doneAt} is null`),
+    index("outbox_waiting")
+      .on(table.dueAt)
+      .where(sql`${table.doneAt} is null`),
     check("outbox_kind", sql`${table.kind} in ('mail', 'job')`),
   ],
 );

@@ -30,5 +30,8 @@ export const sequences = pgTable(
     name: text("name").notNull(),
     createdAt: now("created_at"),
   },
-  (table) => [unique("sequences_number").on(table.productionId, table.number), unique("sequences_in_production").on(table.id, table.productionId)],
+  (table) => [
+    unique("sequences_number").on(table.productionId, table.number),
+    unique("sequences_in_production").on(table.id, table.productionId),
+  ],
 );

@@ -17,7 +17,9 @@ export const submissions = pgTable(
       .references(() => people.id),
     sentAt: now("sent_at"),
   },
-  (table) => [foreignKey({ columns: [table.versionId, table.digest], foreignColumns: [seals.versionId, seals.digest] })],
+  (table) => [
+    foreignKey({ columns: [table.versionId, table.digest], foreignColumns: [seals.versionId, seals.digest] }),
+  ],
 );
 
 /** An advisor's word on frames of a digest. Insert-only; a later one follows, none is altered. */
@@ -62,6 +64,9 @@ export const standingVerdicts = pgTable(
   },
   (table) => [
     primaryKey({ columns: [table.versionId, table.frame] }),
-    foreignKey({ columns: [table.versionId, table.frame], foreignColumns: [frames.versionId, frames.number] }),
+    foreignKey({
+      columns: [table.versionId, table.frame],
+      foreignColumns: [frames.versionId, frames.number],
+    }),
   ],
 );

@@ -24,7 +24,10 @@ export const shots = pgTable(
   (table) => [
     unique("shots_code").on(table.productionId, table.code),
     unique("shots_in_production").on(table.id, table.productionId),
-    foreignKey({ columns: [table.sequenceId, table.productionId], foreignColumns: [sequences.id, sequences.productionId] }),
+    foreignKey({
+      columns: [table.sequenceId, table.productionId],
+      foreignColumns: [sequences.id, sequences.productionId],
+    }),
     check("shots_hold", sql`${table.hold} in ('none', 'on hold', 'omitted')`),
     check("shots_code_form", sql`${table.code} ~ '^[A-Z0-9]+(-[A-Z0-9]+)+$'`),
   ],

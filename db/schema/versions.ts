@@ -1,5 +1,15 @@
 import { sql } from "drizzle-orm";
-import { bigint, check, foreignKey, integer, pgTable, primaryKey, text, unique, uuid } from "drizzle-orm/pg-core";
+import {
+  bigint,
+  check,
+  foreignKey,
+  integer,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { colourSpaces, fileKinds, qualities, renderStates } from "../enums";
 import { at, id, now, sha256 } from "./columns";
 import { people } from "./people";
@@ -30,9 +40,15 @@ export const versions = pgTable(
   (table) => [
     unique("versions_number").on(table.shotId, table.number),
     unique("versions_in_production").on(table.id, table.productionId),
-    foreignKey({ columns: [table.shotId, table.productionId], foreignColumns: [shots.id, shots.productionId] }),
+    foreignKey({
+      columns: [table.shotId, table.productionId],
+      foreignColumns: [shots.id, shots.productionId],
+    }),
     check("versions_range", sql`${table.first} >= 0 and ${table.last} >= ${table.first}`),
-    check("versions_setup_digest", sql`${table.setupDigest} = encode(sha256(convert_to(${table.setup}, 'UTF8')), 'hex')`),
+    check(
+      "versions_setup_digest",
+      sql`${table.setupDigest} = encode(sha256(convert_to(${table.setup}, 'UTF8')), 'hex')`,
+    ),
     check("versions_quality", sql`${table.quality} in ('proof', 'master')`),
     check("versions_colour", sql`${table.colourSpace} in ('rec709', 'acescg')`),
   ],
@@ -53,7 +69,9 @@ export const renders = pgTable(
     changedAt: now("changed_at"),
     finishedAt: at("finished_at"),
   },
-  (table) => [check("renders_state", sql`${table.state} in ('rendering', 'failed', 'cancelled', 'complete')`)],
+  (table) => [
+    check("renders_state", sql`${table.state} in ('rendering', 'failed', 'cancelled', 'complete')`),
+  ],
 );
 
 /** A finished frame. Insert-only, refused outside the version's range and once the version is sealed. */
@@ -84,7 +102,10 @@ export const frameFiles = pgTable(
   (table) => [
     primaryKey({ columns: [table.versionId, table.frame, table.kind] }),
     unique("frame_files_exact").on(table.versionId, table.frame, table.kind, table.sha256),
-    foreignKey({ columns: [table.versionId, table.frame], foreignColumns: [frames.versionId, frames.number] }),
+    foreignKey({
+      columns: [table.versionId, table.frame],
+      foreignColumns: [frames.versionId, frames.number],
+    }),
     check("frame_files_kind", sql`${table.kind} in ('png', 'exr')`),
   ],
 );

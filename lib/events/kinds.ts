@@ -24,7 +24,8 @@ export const eventSentences = {
   "review.sent": (w: Words) => `${w.by} sent version ${w.version} of ${w.shot} for review.`,
   "verdict.signed": (w: Words) => `${w.by} signed off version ${w.version} of ${w.shot}, ${w.frames}.`,
   "verdict.returned": (w: Words) => `${w.by} returned version ${w.version} of ${w.shot}: “${w.words}”`,
-  "verdict.withdrawn": (w: Words) => `${w.by} withdrew the verdict on version ${w.version} of ${w.shot}: “${w.words}”`,
+  "verdict.withdrawn": (w: Words) =>
+    `${w.by} withdrew the verdict on version ${w.version} of ${w.shot}: “${w.words}”`,
   "delivery.made": (w: Words) => `${w.by} assembled delivery ${w.delivery}, ${w.title}.`,
   "delivery.published": (w: Words) => `${w.by} published delivery ${w.delivery} to ${w.to}.`,
   "delivery.withdrawn": (w: Words) => `${w.by} withdrew delivery ${w.delivery}: “${w.words}”`,

@@ -21,6 +21,9 @@ export async function recordEvent(tx: Transaction, event: NewEvent): Promise<voi
 }
 
 /** Tells open pages that something moved, without a line in the log (progress of a render, say). */
-export async function announce(tx: Pick<Transaction, "execute">, change: Record<string, string | number | null>): Promise<void> {
+export async function announce(
+  tx: Pick<Transaction, "execute">,
+  change: Record<string, string | number | null>,
+): Promise<void> {
   await tx.execute(sql`select pg_notify(${changesChannel}, ${JSON.stringify(change)})`);
 }

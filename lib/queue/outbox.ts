@@ -6,10 +6,16 @@ import type { FrameJob } from "../renders/schema";
 
 /** Queues one letter; `key` names its cause, so that it is sent once however often the cause is retried. */
 export async function queueMail(tx: Transaction, key: string, payload: MailPayload): Promise<void> {
-  await tx.insert(outbox).values({ key: `mail ${key}`, kind: "mail", payload }).onConflictDoNothing({ target: outbox.key });
+  await tx
+    .insert(outbox)
+    .values({ key: `mail ${key}`, kind: "mail", payload })
+    .onConflictDoNothing({ target: outbox.key });
 }
 
 /** Queues one job; the key becomes the job's id, so that the queue holds it once. */
 export async function queueJob(tx: Transaction, key: string, payload: FrameJob): Promise<void> {
-  await tx.insert(outbox).values({ key: `job ${key}`, kind: "job", payload }).onConflictDoNothing({ target: outbox.key });
+  await tx
+    .insert(outbox)
+    .values({ key: `job ${key}`, kind: "job", payload })
+    .onConflictDoNothing({ target: outbox.key });
 }
