@@ -1,5 +1,6 @@
 import { readFileSync, writeFileSync } from "node:fs";
 import { createServer } from "node:net";
+import { Refusal } from "./refusal.mjs";
 
 /**
  * The only honest probe is to listen: answers with the port taken, or null when it is in use.
@@ -15,6 +16,20 @@ export function tryPort(port) {
       server.close(() => resolve(typeof address === "object" && address ? address.port : null));
     });
   });
+}
+
+const WEB_PORT = 3000;
+
+/**
+ * The port asked for, which must be free; without a wish 3000, or the next that is free.
+ * @param {number | null} wanted
+ */
+export async function chooseWebPort(wanted) {
+  if (wanted === null) return findPortFrom(WEB_PORT);
+  if (await tryPort(wanted)) return wanted;
+  throw new Refusal(
+    `Port ${wanted} is in use on 127.0.0.1. Give another, or leave --port away and the next free one is taken.`,
+  );
 }
 
 /**
