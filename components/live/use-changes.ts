@@ -2,12 +2,7 @@
 
 import { useRouter } from "next/navigation";
 import { useEffect, useRef } from "react";
-
-/** What open pages are told of: the event's kind, and the ids of what it happened to. */
-export interface Change {
-  kind: string;
-  [name: string]: string | number | null;
-}
+import { listen, type Change } from "./change-stream";
 
 /**
  * Calls `onChange` for every committed change the reader may know of; without it, draws the page anew.
@@ -29,21 +24,16 @@ export function useChanges(only?: (change: Change) => boolean, onChange?: (chang
         router.refresh();
       }, 500);
     };
-    const source = new EventSource("/api/changes");
-    let opened = false;
-    source.addEventListener("open", () => {
-      // After a break something may have been missed.
-      if (opened) refresh();
-      opened = true;
-    });
-    source.addEventListener("message", (message) => {
-      const change = JSON.parse(String(message.data)) as Change;
-      if (latest.current.only && !latest.current.only(change)) return;
-      if (latest.current.onChange) latest.current.onChange(change);
-      else refresh();
+    const stop = listen({
+      onGap: refresh,
+      onChange: (change) => {
+        if (latest.current.only && !latest.current.only(change)) return;
+        if (latest.current.onChange) latest.current.onChange(change);
+        else refresh();
+      },
     });
     return () => {
-      source.close();
+      stop();
       clearTimeout(waiting);
     };
   }, [router]);
