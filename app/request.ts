@@ -8,8 +8,9 @@ const bodyLimit = 1_000_000;
 export function checkOrigin(request: Request): void {
   if (request.method === "GET" || request.method === "HEAD") return;
   const origin = request.headers.get("origin");
-  const host = request.headers.get("x-forwarded-host") ?? request.headers.get("host");
-  if (origin !== null && new URL(origin).host !== host)
+  const host = request.headers.get("host");
+  // A sandboxed page sends the word "null", which is no URL and no origin of ours.
+  if (origin !== null && (!URL.canParse(origin) || new URL(origin).host !== host))
     throw new DomainError(
       "forbidden",
       "This change was asked for by another site's page, so it was not made.",
@@ -23,10 +24,21 @@ export async function readInput(
 ): Promise<unknown> {
   const query = Object.fromEntries(new URL(request.url).searchParams);
   if (request.method === "GET" || request.method === "HEAD") return { ...query, ...params };
-  const text = await request.text();
-  if (text.length > bodyLimit) throw new DomainError("too-large", "The request's body is larger than 1 MB.");
+  const text = await readText(request);
   if (text === "") return { ...query, ...params };
   return { ...query, ...asObject(text), ...params };
+}
+
+/** Reads the body, and stops reading once it is too large, whatever length it claimed. */
+async function readText(request: Request): Promise<string> {
+  const pieces: Uint8Array[] = [];
+  let bytes = 0;
+  for await (const piece of request.body ?? []) {
+    bytes += piece.byteLength;
+    if (bytes > bodyLimit) throw new DomainError("too-large", "The request's body is larger than 1 MB.");
+    pieces.push(piece);
+  }
+  return Buffer.concat(pieces).toString("utf8");
 }
 
 function asObject(text: string): object {
