@@ -1,5 +1,5 @@
-import { existsSync, readFileSync, rmSync, statSync, writeFileSync } from "node:fs";
-import { join } from "node:path";
+import { existsSync, mkdirSync, readFileSync, rmSync, statSync, writeFileSync } from "node:fs";
+import { dirname, join, relative } from "node:path";
 import { step } from "./progress.mjs";
 import { stampOf } from "./stamps.mjs";
 import { mustRun } from "./task.mjs";
@@ -40,19 +40,28 @@ export async function ensureWebBuild(context, distDir, logFile) {
     existsSync(stampFile) && existsSync(join(built, "BUILD_ID")) ? readFileSync(stampFile, "utf8") : "";
   if (last === stamp) return;
   rmSync(stampFile, { force: true });
-  const env = {
-    ...process.env,
-    NODE_ENV: "production",
-    NEXT_DIST_DIR: distDir,
-    NEXT_TELEMETRY_DISABLED: "1",
+  if (distDir !== ".next") writeOwnTsconfig(context.cwd, dirname(built));
+  /** @type {import("./task.mjs").TaskContext} */
+  const build = {
+    ...context,
+    env: { ...process.env, NODE_ENV: "production", NEXT_DIST_DIR: distDir, NEXT_TELEMETRY_DISABLED: "1" },
   };
   const command = [process.execPath, "node_modules/next/dist/bin/next", "build"];
   await step(
     "The web app is built",
-    () => mustRun({ ...context, env }, command, "The web app could not be built", logFile),
+    () => mustRun(build, command, "The web app could not be built", logFile),
     "Building the web app: about half a minute, after each change of its sources.",
   );
   writeFileSync(stampFile, stamp);
+}
+
+/** next.config.mjs looks for it beside any build but the usual one. @param {string} root @param {string} folder */
+function writeOwnTsconfig(root, folder) {
+  mkdirSync(folder, { recursive: true });
+  writeFileSync(
+    join(folder, "tsconfig.json"),
+    JSON.stringify({ extends: relative(folder, join(root, "tsconfig.json")) }),
+  );
 }
 
 /**
