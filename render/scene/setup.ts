@@ -5,10 +5,14 @@ import { findForbidden } from "./legality";
 
 const between = (low: number, high: number, unit = "") => {
   const range = `between ${low.toLocaleString("en")} and ${high.toLocaleString("en")}${unit && ` ${unit}`}`;
-  return z.number({ error: `A number ${range}.` }).min(low, `Must be ${range}.`).max(high, `Must be ${range}.`);
+  return z
+    .number({ error: `A number ${range}.` })
+    .min(low, `Must be ${range}.`)
+    .max(high, `Must be ${range}.`);
 };
 
-const wholeBetween = (low: number, high: number, unit = "") => between(low, high, unit).int("Must be a whole number.");
+const wholeBetween = (low: number, high: number, unit = "") =>
+  between(low, high, unit).int("Must be a whole number.");
 
 export const observerKinds = ["held", "zero-angular-momentum", "circular-orbit", "falling"] as const;
 export type ObserverKind = (typeof observerKinds)[number];
@@ -71,7 +75,11 @@ export const setupSchema = z
     }),
     disk: diskSchema.nullable(),
     sky: skySchema,
-    time: z.strictObject({ rate: rateSchema, first: wholeBetween(0, 999_999), last: wholeBetween(0, 999_999) }),
+    time: z.strictObject({
+      rate: rateSchema,
+      first: wholeBetween(0, 999_999),
+      last: wholeBetween(0, 999_999),
+    }),
     picture: z.strictObject({
       width: wholeBetween(16, 8192, "pixels"),
       height: wholeBetween(16, 8192, "pixels"),
