@@ -3,6 +3,13 @@ import { DomainError } from "../errors";
 import { policy, type Action, type Standing } from "./policy";
 
 const refusals: Partial<Record<Action, string>> = {
+  "production.create": "Only the studio's owner can begin a production.",
+  "people.see": "Only producers and the studio's owner see who is in a production.",
+  "people.invite": "Only a producer of this production, or the studio's owner, can invite people into it.",
+  "people.remove": "Only a producer of this production, or the studio's owner, can end a membership.",
+  "people.close": "Only the studio's owner can close an account.",
+  "studio.see": "Only the studio's owner can see this.",
+  "studio.mail": "Only the studio's owner can read the local mail.",
   "setup.save": "Only an artist of this production can change a setup.",
   "version.render": "Only an artist of this production can render a version.",
   "review.send": "Only an artist of this production can send a version for review.",

@@ -8,13 +8,14 @@ import { log } from "../log";
 import { checkCredentials } from "../people/check-credentials";
 import { credentialsSchema } from "../people/schema";
 import { clientAddress } from "./client-address";
+import { studioSecret } from "./secret";
 
 const oneWeek = 7 * 24 * 60 * 60;
 
 /** Made on each request, so that building the program needs no secret. */
 export function authOptions(): NextAuthOptions {
   return {
-    secret: process.env.NEXTAUTH_SECRET,
+    secret: studioSecret(),
     session: { strategy: "jwt", maxAge: oneWeek },
     pages: { signIn: "/sign-in", signOut: "/sign-in", error: "/sign-in" },
     providers: [

@@ -12,6 +12,7 @@ export const policy = {
   "people.see": ["producer", "owner"],
   "people.invite": ["producer", "owner"],
   "people.remove": ["producer", "owner"],
+  "people.close": ["owner"],
   "studio.see": ["owner"],
   "studio.mail": ["owner"],
   "log.see": members,
