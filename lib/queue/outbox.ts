@@ -12,10 +12,8 @@ export async function queueMail(tx: Transaction, key: string, payload: MailPaylo
     .onConflictDoNothing({ target: outbox.key });
 }
 
-/** Queues one job; the key becomes the job's id, so that the queue holds it once. */
-export async function queueJob(tx: Transaction, key: string, payload: FrameJob): Promise<void> {
-  await tx
-    .insert(outbox)
-    .values({ key: `job ${key}`, kind: "job", payload })
-    .onConflictDoNothing({ target: outbox.key });
+/** Queues jobs, each under a key that becomes the job's id, so that the queue holds it once. */
+export async function queueJobs(tx: Transaction, jobs: { key: string; payload: FrameJob }[]): Promise<void> {
+  const rows = jobs.map(({ key, payload }) => ({ key: `job ${key}`, kind: "job" as const, payload }));
+  if (rows.length > 0) await tx.insert(outbox).values(rows).onConflictDoNothing({ target: outbox.key });
 }
