@@ -3,8 +3,11 @@
 import { z } from "zod";
 import { findForbidden } from "./legality";
 
+const figure = (value: number) => value.toLocaleString("en", { maximumFractionDigits: 6 });
+
 const between = (low: number, high: number, unit = "") => {
-  const range = `between ${low.toLocaleString("en")} and ${high.toLocaleString("en")}${unit && ` ${unit}`}`;
+  const spaced = unit === "" || unit === "°" ? unit : ` ${unit}`;
+  const range = `between ${figure(low)} and ${figure(high)}${spaced}`;
   return z
     .number({ error: `A number ${range}.` })
     .min(low, `Must be ${range}.`)
