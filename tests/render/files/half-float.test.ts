@@ -1,14 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { halfBits } from "@/render/files/half-float";
-
-/** The value of a half, straight from IEEE 754's definition. */
-function halfValue(bits: number) {
-  const sign = bits & 0x8000 ? -1 : 1;
-  const exponent = (bits >> 10) & 31;
-  const fraction = bits & 1023;
-  if (exponent === 31) return fraction ? NaN : sign * Infinity;
-  return sign * (exponent ? 2 ** (exponent - 15) * (1 + fraction / 1024) : 2 ** -24 * fraction);
-}
+import { halfValue } from "./read-exr";
 
 describe("half floats", () => {
   it("every one of the 63 488 finite halves comes back as itself", () => {
