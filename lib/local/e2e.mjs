@@ -50,21 +50,15 @@ export async function runE2e({ task, folders, shutdown, cluster, password, admin
   const url = await step("Web, worker and mail server are running", () =>
     raiseStudio({ root, folders, env, signal, onStop, giveUp: end }),
   );
-  return runPlaywright({ ...task, env: { ...env, E2E_BASE_URL: url, TEST_DATABASE_URL: adminUrl } }, folders);
-}
-
-/** @param {import("./task.mjs").TaskContext} task @param {import("./folders.mjs").Folders} folders */
-async function runPlaywright(task, folders) {
   const report = join(folders.data, "playwright.json");
   rmSync(report, { force: true });
   // The pids let a test end the worker as a crash would.
-  const env = {
-    ...process.env,
-    ...task.env,
+  const told = {
+    E2E_BASE_URL: url,
     E2E_REPORT: report,
     E2E_PIDS_FILE: folders.pids,
-    NODE_ENV: undefined,
+    TEST_DATABASE_URL: adminUrl,
   };
   const command = [process.execPath, "node_modules/@playwright/test/cli.js", "test"];
-  return readTotals(report, await runTask({ ...task, env }, command), countPlaywright);
+  return readTotals(report, await runTask({ ...task, env: { ...env, ...told } }, command), countPlaywright);
 }
