@@ -1,0 +1,50 @@
+import { JoinKnownForm } from "./join-known-form";
+import { JoinNewForm } from "./join-new-form";
+import { Threshold } from "./threshold";
+
+export interface InvitationProps {
+  token: string;
+  invitation: {
+    production: string;
+    role: string;
+    by: string;
+    email: string;
+    name: string;
+    personId: string | null;
+  };
+  /** The account the reader is signed in to, if any. */
+  signedIn?: { id: string; name: string } | undefined;
+}
+
+const roleWords: Record<string, string> = {
+  artist: "an artist",
+  advisor: "its science advisor",
+  producer: "a producer",
+  client: "a client",
+};
+
+export function Invitation({ token, invitation, signedIn }: InvitationProps) {
+  const { production, role, by, email, name, personId } = invitation;
+  const isReader = signedIn !== undefined && signedIn.id === personId;
+  return (
+    <Threshold
+      title={`Join ${production}.`}
+      words={`${by} invites you as ${roleWords[role] ?? role}. ${whatNext(personId !== null, isReader, signedIn?.name)}`}
+    >
+      {personId === null ? (
+        <JoinNewForm token={token} email={email} name={name} />
+      ) : (
+        <JoinKnownForm token={token} email={email} signedIn={isReader} />
+      )}
+    </Threshold>
+  );
+}
+
+function whatNext(known: boolean, isReader: boolean, readerName: string | undefined): string {
+  const other =
+    readerName && !isReader ? ` You are signed in as ${readerName} now; accepting signs you in anew.` : "";
+  if (!known) return `This makes an account for the address below.${other}`;
+  return isReader
+    ? "You are signed in to the account below."
+    : `The address below has an account: its password is asked.${other}`;
+}
