@@ -1,6 +1,12 @@
 import type { ReactNode } from "react";
+import { SignOut } from "@/components/sign-in/sign-out";
 import { Shell } from "../shell";
+import { readShellActor } from "../shell-actor";
 
-export default function ViewingLayout({ children }: { children: ReactNode }) {
-  return <Shell native="viewing">{children}</Shell>;
+export default async function ViewingLayout({ children }: { children: ReactNode }) {
+  return (
+    <Shell native="viewing" actor={await readShellActor()} signOut={<SignOut />}>
+      {children}
+    </Shell>
+  );
 }

@@ -13,7 +13,7 @@ export function RoomChoice({ native, room, onChoose }: RoomChoiceProps) {
     <form action={onChoose}>
       <input type="hidden" name="native" value={native} />
       <button type="submit" className="action cursor-pointer text-soft">
-        <span className="max-sm:sr-only">Read this page </span>
+        Read <span className="max-sm:sr-only">this page </span>
         {room === "desk" ? "dark" : "light"}
       </button>
     </form>

@@ -23,7 +23,7 @@ export function Topbar({ items, production, person, role, children }: TopbarProp
       <div className="grid grid-cols-[auto_1fr] items-center gap-x-24 md:grid-cols-[auto_auto_1fr] xl:grid-cols-[1fr_auto_1fr]">
         <Link
           href="/"
-          className="type-prose flex h-39 items-center justify-self-start text-text hover:text-bright"
+          className="type-note flex h-39 items-center pb-2 justify-self-start text-text hover:text-bright"
         >
           Ringwright
         </Link>
