@@ -32,7 +32,7 @@ export async function ensureTemplate(root, cluster, password) {
  * @param {string} root
  * @param {string} url
  */
-export async function migrate(root, url) {
+async function migrate(root, url) {
   const { code, output } = await runCommand({
     command: process.execPath,
     args: ["--import", "tsx", join("db", "migrate.ts")],

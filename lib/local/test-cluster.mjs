@@ -12,7 +12,7 @@ import { ensureTemplate } from "./template.mjs";
 const SETTINGS = ["fsync=off", "synchronous_commit=off", "full_page_writes=off", "max_connections=200"];
 
 /** @param {string} root */
-export const testFolder = (root) => join(root, ".data", "test");
+const testFolder = (root) => join(root, ".data", "test");
 /** @param {string} root */
 const urlFile = (root) => join(testFolder(root), "database-url");
 

@@ -37,7 +37,7 @@ export async function runTests(only, folders, shutdown, count) {
     ["postgresql", "chromium", "openexr", "unzip"],
     join(folders.logs, "apt.log"),
   );
-  if (only === "all") count(await runVerify());
+  if (only === "all") count(await runVerify(shutdown.signal));
   const { cluster, url, password } = await raiseCluster(folders, shutdown);
   await ensureSky(task, join(folders.logs, "sky.log"));
   if (PROJECTS[only].length > 0) count(await runVitest(task, folders, PROJECTS[only], url));
