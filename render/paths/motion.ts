@@ -58,6 +58,9 @@ export function setMotion(start: PathStart, work: PathWork): boolean {
   motion.scale = scale;
   motion.uHorizon = 1 / outerHorizon(a);
   motion.energySign = timeRate(a, lambda, rObs, mu0) < 0 ? -1 : 1;
+  motion.polarTwist = eta > 0 ? lambda * a * a : 0;
+  motion.polarBase = eta > 0 ? eta : 1;
+  motion.polarSquare = eta > 0 ? a * a : 0;
 
   const perScale = 1 / scaleSquared;
   const bending = eta + (lambda - a) * (lambda - a);

@@ -18,6 +18,10 @@ export interface Motion {
   uHorizon: number;
   /** Sign of the photon's energy at infinity: negative only for light from within the ergosphere. */
   energySign: number;
+  /** Of the polar azimuth's integrand, twist·μ²/(base + square·μ²): λa², η, a²; inert when η ≤ 0. */
+  polarTwist: number;
+  polarBase: number;
+  polarSquare: number;
   /** α, β, γ of u'' = αu + βu² + γu³, then those of μ''. */
   force: Float64Array;
 }
@@ -31,8 +35,13 @@ export interface PathWork {
   /** Step in which each listed crossing lies, and where in it. */
   crossingStep: Int32Array;
   crossingAt: Float64Array;
-  /** Running ∫ (azimuth beyond its closed form, delay) over the path. */
-  sums: Float64Array;
+  /** Running integrals over the path: azimuth and delay beyond their closed forms, and Π u^σ. One number each. */
+  azimuth: Float64Array;
+  delay: Float64Array;
+  ratio: Float64Array;
+  /** u, u' and μ at the eight quadrature nodes, and u where the stretch begins. */
+  samples: Float64Array;
+  radius: Float64Array;
   /** Ends of the stretch being integrated. */
   span: Float64Array;
 }
@@ -45,14 +54,21 @@ export function createPathWork(): PathWork {
       eta: NaN,
       scale: NaN,
       uHorizon: NaN,
-      energySign: 1,
+      energySign: NaN,
+      polarTwist: NaN,
+      polarBase: NaN,
+      polarSquare: NaN,
       force: new Float64Array(6),
     },
     series: new Float64Array((stepLimit + 1) * stride),
     length: new Float64Array(stepLimit),
     crossingStep: new Int32Array(3),
     crossingAt: new Float64Array(3),
-    sums: new Float64Array(2),
+    azimuth: new Float64Array(1),
+    delay: new Float64Array(1),
+    ratio: new Float64Array(1),
+    samples: new Float64Array(24),
+    radius: new Float64Array(1),
     span: new Float64Array(2),
   };
 }

@@ -2,6 +2,9 @@
 // never by interpolating between steps.
 import { order } from "./series";
 
+// Newton's error is squared by each round, so a move this small leaves one below rounding.
+const quadratic = 1e-8;
+
 /** The series at s. */
 export function valueAt(series: Float64Array, offset: number, s: number): number {
   let value = series[offset + order]!;
@@ -35,12 +38,18 @@ export function whereEquals(series: Float64Array, offset: number, target: number
   if (first === 0) return 0;
   let s = (length * first) / (first - last);
   for (let round = 0; round < 60; round++) {
-    const excess = valueAt(series, offset, s) - target;
+    let excess = series[offset + order]!;
+    let slope = 0;
+    for (let k = order - 1; k >= 0; k--) {
+      slope = slope * s + excess;
+      excess = excess * s + series[offset + k]!;
+    }
+    excess -= target;
     if (excess > 0 === first > 0) low = s;
     else high = s;
-    const next = s - excess / slopeAt(series, offset, s);
+    const next = s - excess / slope;
     const moved = next >= low && next <= high ? next : 0.5 * (low + high);
-    if (Math.abs(moved - s) <= 2e-16 * length || moved === s) return moved;
+    if (Math.abs(moved - s) <= quadratic * length) return moved;
     s = moved;
   }
   return s;
@@ -59,7 +68,7 @@ export function whereTurns(series: Float64Array, offset: number, length: number)
     else high = s;
     const next = s - slope / curvatureAt(series, offset, s);
     const moved = next >= low && next <= high ? next : 0.5 * (low + high);
-    if (Math.abs(moved - s) <= 1e-12 * length || moved === s) return moved;
+    if (Math.abs(moved - s) <= quadratic * length) return moved;
     s = moved;
   }
   return s;

@@ -1,8 +1,9 @@
 // The readable reference tracer: one light path, from an observer into the past, by Taylor series in Mino time.
 // Variables u = 1/r and μ = cos θ have neither square roots nor sign changes at turning points (PHYSICS §3).
-import { addSpan, azimuthOfOrbit, azimuthSum, delaySum } from "./delays";
+import { addSpan, clearSums } from "./delays";
 import { clearPathRecord, fates, listedCrossings, type PathRecord, type PathStart } from "./light-path";
 import { polarPotential, radialPotential, setMotion } from "./motion";
+import { azimuthOfOrbit } from "./polar-azimuth";
 import { stepLimit, stride, type PathWork } from "./path-work";
 import { slopeAt, valueAt, whereEquals, whereTurns } from "./polynomials";
 import { expandSeries, order, terms } from "./series";
@@ -146,15 +147,14 @@ function noteCrossing(record: PathRecord, step: number, s: number, options: Trac
 /** Second pass: φ and t, only as far as a listed crossing or an escape needs them. */
 function addAzimuthAndTime(record: PathRecord, withTime: boolean): void {
   const { work } = record;
-  const { motion, series, span, sums } = work;
+  const { motion, series, span } = work;
   const { lambda, eta, scale, energySign } = motion;
   const turnSign = lambda < 0 ? -1 : 1;
   const onAxis = Math.abs(series[terms]!) === 1;
   const begun = onAxis ? Math.PI : azimuthOfOrbit(lambda, series[terms]!, scale * series[terms + 1]!);
   const lastStep =
     record.fate === fates.escaped ? record.steps - 1 : work.crossingStep[record.crossingCount - 1]!;
-  sums[azimuthSum] = 0;
-  sums[delaySum] = 0;
+  clearSums(work);
 
   let crossing = 0;
   for (let step = 0; step <= lastStep; step++) {
@@ -165,8 +165,8 @@ function addAzimuthAndTime(record: PathRecord, withTime: boolean): void {
       span[1] = s;
       addSpan(work, at, withTime);
       const turned = eta > 0 ? Math.PI * (crossing + 1) - begun : 0;
-      record.dphi[crossing] = -energySign * (sums[azimuthSum]! + turnSign * turned);
-      record.dt[crossing] = energySign * sums[delaySum]!;
+      record.dphi[crossing] = -energySign * (work.azimuth[0]! + turnSign * turned);
+      record.dt[crossing] = withTime ? energySign * delayAt(work, at, s) : 0;
       record.axisBefore[crossing] = lambda === 0 ? Math.round(turned / Math.PI) : 0;
       crossing++;
       span[0] = s;
@@ -182,8 +182,15 @@ function addAzimuthAndTime(record: PathRecord, withTime: boolean): void {
   const since = azimuthOfOrbit(lambda, mu, scale * slopeAt(series, at, end));
   const turned = eta > 0 ? Math.PI * record.crossingsTotal + since - begun : 0;
   record.cosThetaInf = mu;
-  record.dphiInf = -energySign * (sums[azimuthSum]! + turnSign * turned);
+  record.dphiInf = -energySign * (work.azimuth[0]! + turnSign * turned);
   record.axisPassages = lambda === 0 ? Math.round(turned / Math.PI) : 0;
+}
+
+/** The delay at an event: the running integral, and what its closed forms give between the observer and here. */
+function delayAt({ motion, series, delay, ratio }: PathWork, at: number, s: number): number {
+  const here = slopeAt(series, at, s) / valueAt(series, at, s);
+  const there = series[1]! / series[0]!;
+  return delay[0]! + 2 * Math.log(ratio[0]!) + motion.scale * (there - here);
 }
 
 /** How far the last step's start has drifted from u'² = U and μ'² = M, each on its own scale. */
