@@ -3,6 +3,7 @@ type Words = Record<string, string | number>;
 
 export const eventSentences = {
   "studio.made": (w: Words) => `The studio ${w.studio} was set up.`,
+  "demonstration.made": (w: Words) => `${w.by} finished the demonstration.`,
   "production.made": (w: Words) => `${w.by} began the production ${w.production}.`,
   "person.invited": (w: Words) => `${w.by} invited ${w.email} as ${w.role}.`,
   "invitation.revoked": (w: Words) => `${w.by} took back the invitation to ${w.email}.`,
@@ -30,6 +31,8 @@ export const eventSentences = {
   "delivery.published": (w: Words) => `${w.by} published delivery ${w.delivery} to ${w.to}.`,
   "delivery.withdrawn": (w: Words) => `${w.by} withdrew delivery ${w.delivery}: “${w.words}”`,
   "delivery.taken": (w: Words) => `${w.by} took ${w.what} of delivery ${w.delivery}.`,
+  "delivery.damaged": (w: Words) =>
+    `A download of delivery ${w.delivery} broke off: ${w.file} in storage is not as it was signed.`,
   "receipt.signed": (w: Words) => `${w.by} received delivery ${w.delivery}: ${w.files} files, all as signed.`,
   "receipt.refused": (w: Words) => `${w.by} refused delivery ${w.delivery}: “${w.words}”`,
 } as const;
