@@ -45,7 +45,7 @@ export async function runE2e({ task, folders, shutdown, cluster, password, admin
     smtpPort: await keepPort(folders.ports, "mail"),
     distDir,
   });
-  await step("The demonstration studio is there", () => makeDemonstration({ ...task, env }));
+  await step("The studio is in place", () => makeDemonstration({ ...task, env }));
   const { signal, onStop, end } = shutdown;
   const url = await step("Web, worker and mail server are running", () =>
     raiseStudio({ root, folders, env, signal, onStop, giveUp: end }),

@@ -96,7 +96,7 @@ async function prepareData(options, folders, shutdown, task) {
       join(folders.logs, "migrate.log"),
     ),
   );
-  await step("The demonstration studio is there", () => makeDemonstration({ ...task, env }));
+  await step("The studio is in place", () => makeDemonstration({ ...task, env }));
   return env;
 }
 
