@@ -1,6 +1,14 @@
 import { z } from "zod";
-import { colourSpaces, fileKinds, qualities } from "@/db/enums";
-import { maximumFrames } from "@/render/scene/setup";
+import {
+  colourSpaces,
+  fileKinds,
+  qualities,
+  type ColourSpace,
+  type Quality,
+  type RenderState,
+} from "@/db/enums";
+import { maximumFrames, type Setup } from "@/render/scene/setup";
+import type { Standing } from "../shots/schema";
 
 const frameNumber = z.coerce
   .number({ error: "A whole frame number." })
@@ -35,6 +43,8 @@ export const frameFileInput = versionIdInput.extend({
   kind: z.enum(fileKinds, { error: "A frame's file is png or exr." }),
 });
 
+export const filesInput = versionIdInput.extend({ from: frameNumber.default(0) });
+
 export const thumbnailInput = versionIdInput.extend({
   frame: frameNumber,
   width: z.coerce.number().pipe(z.union([z.literal(168), z.literal(336)], { error: "168 or 336 pixels." })),
@@ -50,3 +60,70 @@ export const colourSpaceWords: Record<(typeof colourSpaces)[number], string> = {
   rec709: "linear Rec.709",
   acescg: "ACEScg",
 };
+
+export interface VersionLine {
+  id: string;
+  number: number;
+  standing: Standing;
+  quality: Quality;
+  colourSpace: ColourSpace;
+  first: number;
+  last: number;
+  madeAt: string;
+  maker: string;
+  /** Once sealed. */
+  digest: string | null;
+  /** Finished frames. */
+  done: number;
+  firstFinished: number | null;
+}
+
+export interface FileLine {
+  frame: number;
+  kind: "png" | "exr";
+  sha256: string;
+  bytes: number;
+  /** What it is called when it is taken. */
+  name: string;
+}
+
+/** How its rendering stands. */
+export interface RenderFacts {
+  state: RenderState;
+  attempt: number;
+  failedFrame: number | null;
+  failure: string | null;
+  changedAt: string;
+  /** Machine time of the finished frames. */
+  milliseconds: number;
+  unresolved: number;
+}
+
+export interface VersionPage {
+  id: string;
+  number: number;
+  production: { id: string; name: string };
+  shot: { id: string; code: string; brief: string };
+  standing: Standing;
+  /** The shot's newest version, when it is not this one. */
+  newer: { id: string; number: number } | null;
+  setup: Setup;
+  setupDigest: string;
+  kernel: string;
+  /** The kernel of the program that shows the page. */
+  kernelHere: string;
+  quality: Quality;
+  colourSpace: ColourSpace;
+  channels: string;
+  first: number;
+  last: number;
+  maker: { id: string; name: string };
+  madeAt: string;
+  render: RenderFacts;
+  /** Finished frames as runs without gaps. */
+  finished: { first: number; last: number }[];
+  seal: { digest: string; bytes: number; sealedAt: string } | null;
+  sent: { at: string; by: string; words: string } | null;
+  history: { at: string; sentence: string }[];
+  may: { cancel: boolean; resume: boolean };
+}
