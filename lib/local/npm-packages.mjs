@@ -37,6 +37,6 @@ export async function ensureNpmPackages(context, logFile) {
   await step(
     "The npm packages are installed",
     () => mustRun(context, command, "npm ci could not install the packages", logFile),
-    "Installing npm packages: about half a minute, once.",
+    "Installing npm packages: a minute or two, once.",
   );
 }
