@@ -20,10 +20,17 @@ export async function recordEvent(tx: Transaction, event: NewEvent): Promise<voi
   await announce(tx, { productionId: event.productionId, kind: event.kind, ...event.subject });
 }
 
-/** Tells open pages that something moved, without a line in the log (progress of a render, say). */
+/**
+ * Tells open pages that something moved, without a line in the log (progress of a render, say). Ids and numbers are told,
+ * words are not: a notification holds 8,000 bytes at most, and pages read the words for themselves.
+ */
 export async function announce(
   tx: Pick<Transaction, "execute">,
-  change: Record<string, string | number | null>,
+  { kind, ...about }: { kind: string } & Record<string, string | number | null>,
 ): Promise<void> {
-  await tx.execute(sql`select pg_notify(${changesChannel}, ${JSON.stringify(change)})`);
+  const told = Object.entries(about).filter(
+    ([name, value]) => name.endsWith("Id") || typeof value === "number",
+  );
+  const payload = JSON.stringify({ kind, ...Object.fromEntries(told) });
+  await tx.execute(sql`select pg_notify(${changesChannel}, ${payload})`);
 }
