@@ -26,10 +26,12 @@ const roleWords: Record<string, string> = {
 export function Invitation({ token, invitation, signedIn }: InvitationProps) {
   const { production, role, by, email, name, personId } = invitation;
   const isReader = signedIn !== undefined && signedIn.id === personId;
+  const elsewhere =
+    signedIn && !isReader ? ` You are signed in as ${signedIn.name} now; accepting signs you in anew.` : "";
   return (
     <Threshold
       title={`Join ${production}.`}
-      words={`${by} invites you as ${roleWords[role] ?? role}. ${whatNext(personId !== null, isReader, signedIn?.name)}`}
+      words={`${by} invites you as ${roleWords[role] ?? role}. ${whatNext(email, personId !== null, isReader)}${elsewhere}`}
     >
       {personId === null ? (
         <JoinNewForm token={token} email={email} name={name} />
@@ -40,11 +42,9 @@ export function Invitation({ token, invitation, signedIn }: InvitationProps) {
   );
 }
 
-function whatNext(known: boolean, isReader: boolean, readerName: string | undefined): string {
-  const other =
-    readerName && !isReader ? ` You are signed in as ${readerName} now; accepting signs you in anew.` : "";
-  if (!known) return `This makes an account for the address below.${other}`;
+function whatNext(email: string, known: boolean, isReader: boolean): string {
+  if (!known) return `This makes an account for ${email}.`;
   return isReader
-    ? "You are signed in to the account below."
-    : `The address below has an account: its password is asked.${other}`;
+    ? `You are signed in as ${email}, the address that is invited.`
+    : `${email} has an account, so its password is asked.`;
 }

@@ -40,7 +40,7 @@ export function JoinKnownForm({ token, email, signedIn }: JoinKnownFormProps) {
   });
   return (
     <form method="post" onSubmit={submit} noValidate className="grid gap-16">
-      <TextField label="E-mail" type="email" autoComplete="username" value={email} readOnly />
+      <input type="email" name="email" autoComplete="username" value={email} readOnly hidden />
       {!signedIn && (
         <TextField
           label="Password"

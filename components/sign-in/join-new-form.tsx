@@ -40,7 +40,7 @@ export function JoinNewForm({ token, email, name }: JoinNewFormProps) {
   });
   return (
     <form method="post" onSubmit={submit} noValidate className="grid gap-16">
-      <TextField label="E-mail" type="email" autoComplete="username" value={email} readOnly />
+      <input type="email" name="email" autoComplete="username" value={email} readOnly hidden />
       <TextField
         label="Your name"
         autoComplete="name"

@@ -9,12 +9,12 @@ export function Accounts({ accounts, readerId }: { accounts: Account[]; readerId
       <h2 id="accounts" className="type-heading text-text">
         Everyone with an account
       </h2>
-      <Table className="mt-12" aria-labelledby="accounts">
+      <Table className="mt-12 table-fixed" aria-labelledby="accounts">
         <thead>
           <tr>
-            <HeadCell>name</HeadCell>
+            <HeadCell className="sm:w-2/5">name</HeadCell>
             <HeadCell className="max-sm:hidden">e-mail</HeadCell>
-            <HeadCell>
+            <HeadCell className="w-124">
               <span className="sr-only">what can be done</span>
             </HeadCell>
           </tr>

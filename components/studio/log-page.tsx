@@ -86,7 +86,7 @@ function Lines({ lines, timeZone }: Pick<LogPageProps, "lines" | "timeZone">) {
       <thead>
         <tr>
           <HeadCell className="text-right max-sm:hidden">line</HeadCell>
-          <HeadCell>time in {timeZone}</HeadCell>
+          <HeadCell className="max-sm:pl-0">time in {timeZone}</HeadCell>
           <HeadCell>what happened</HeadCell>
           <HeadCell className="text-right max-md:hidden">hash</HeadCell>
         </tr>
@@ -95,7 +95,7 @@ function Lines({ lines, timeZone }: Pick<LogPageProps, "lines" | "timeZone">) {
         {lines.map(({ seq, at, sentence, hash }) => (
           <Row key={seq}>
             <Cell className="type-figure w-48 text-right text-soft max-sm:hidden">{seq}</Cell>
-            <Cell className="type-figure-small w-186 text-soft sm:whitespace-nowrap">
+            <Cell className="type-figure-small w-186 text-soft max-sm:pl-0 sm:whitespace-nowrap">
               <time dateTime={at}>{momentOf(at, timeZone)}</time>
             </Cell>
             <Cell className="py-8 break-words">{sentence}</Cell>

@@ -25,13 +25,13 @@ export function ProductionSection({ production, timeZone }: ProductionSectionPro
       {members.length + invitations.length === 0 ? (
         <p className="type-body mt-12 text-soft">Nobody is in it yet. Invite its producer first.</p>
       ) : (
-        <Table className="mt-12" aria-labelledby={`production-${id}`}>
+        <Table className="mt-12 table-fixed" aria-labelledby={`production-${id}`}>
           <thead>
             <tr>
-              <HeadCell>name</HeadCell>
+              <HeadCell className="w-2/5">name</HeadCell>
               <HeadCell>role</HeadCell>
-              <HeadCell className="max-sm:hidden">since</HeadCell>
-              <HeadCell>
+              <HeadCell className="w-162 max-sm:hidden">since</HeadCell>
+              <HeadCell className="w-124">
                 <span className="sr-only">what can be done</span>
               </HeadCell>
             </tr>
@@ -62,7 +62,7 @@ function MemberRow({ production, member, timeZone }: ProductionSectionProps & { 
           path={`/api/productions/${production.id}/people/${personId}`}
           word="End membership"
           about={name}
-          title={`End ${name}'s membership of ${production.name}?`}
+          title={`End ${name}’s membership of ${production.name}?`}
           description="They are out with their next click. What they made and said stays, and they can be invited again."
         />
       </Cell>

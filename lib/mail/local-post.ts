@@ -54,7 +54,7 @@ async function keep(stream: Readable, session: SMTPServerSession, folder: string
     id,
     receivedAt,
     messageId: mail.messageId ?? "",
-    from: mail.from?.text ?? "",
+    from: mail.from?.value.map(({ name, address }) => `${name} <${address}>`.trim()).join(", ") ?? "",
     to: session.envelope.rcptTo.map(({ address }) => address),
     subject: mail.subject ?? "",
     text: mail.text ?? "",

@@ -43,7 +43,10 @@ export async function useLink(tx: Transaction, link: Link): Promise<void> {
     )
     .returning({ id: links.id });
   if (used.length === 0)
-    throw new DomainError("conflict", `${noun(link)} was used or taken back this moment.`);
+    throw new DomainError(
+      "conflict",
+      `${noun(link)} was used or taken back this moment. Open it again to see which.`,
+    );
 }
 
 function whyShut(link: Link, by: string): string | null {

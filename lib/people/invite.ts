@@ -25,18 +25,16 @@ export async function invitePerson(ctx: Ctx, input: z.infer<typeof inviteInput>)
     await revokeLinks(tx, { purpose: "invitation", email, productionId });
     const link = newLink();
     const expiresAt = new Date(Date.now() + sevenDays);
-    await tx
-      .insert(links)
-      .values({
-        ...link,
-        purpose: "invitation",
-        email,
-        name,
-        productionId,
-        role,
-        createdBy: ctx.actor.id,
-        expiresAt,
-      });
+    await tx.insert(links).values({
+      ...link,
+      purpose: "invitation",
+      email,
+      name,
+      productionId,
+      role,
+      createdBy: ctx.actor.id,
+      expiresAt,
+    });
     await recordEvent(tx, {
       productionId,
       actorId: ctx.actor.id,
