@@ -1,7 +1,7 @@
 // Azimuth and arrival time along a traced path: the integrals of PHYSICS §3, with everything that is singular or
 // large taken out in closed form, and the smooth rest summed by Gauss–Legendre quadrature on the steps' own series.
 import { addVortical } from "./polar-azimuth";
-import { nodes, weights } from "./quadrature";
+import { nodes, weights } from "../spacetime/quadrature";
 import type { PathWork } from "./path-work";
 import { order, terms } from "./series";
 

@@ -1,6 +1,6 @@
 // The azimuth a path gains from λ/(1−μ²), which is sharp near the axis and jumps there when λ = 0.
 import type { PathWork } from "./path-work";
-import { weights } from "./quadrature";
+import { weights } from "../spacetime/quadrature";
 import { order, terms } from "./series";
 
 /**

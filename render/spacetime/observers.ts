@@ -146,32 +146,39 @@ export function receivePhoton(
   photon.phiStart = Math.atan2(-pph, cosTheta > 0 ? -pth : pth);
 }
 
+type Constants = Pick<ReceivedPhoton, "lambda" | "eta" | "signPr" | "signPtheta">;
+
+/**
+ * Momentum per unit |E| of a photon of given constants in the ZAMO frame at a camera off the axis: p^(t) = |1 − ωλ|/α,
+ * p^(φ) = λ/√g_φφ, (p^(θ))² = Θ/Σ, and p^(r) from p·p = 0 (PHYSICS §§3, 5). `sign` is that of E.
+ */
+export function zamoMomentum(camera: Camera, { lambda, eta, signPr, signPtheta }: Constants) {
+  const { a, cosTheta } = camera;
+  const dragged = 1 - camera.frameDragging * lambda;
+  const sign = dragged < 0 ? -1 : 1;
+  const pt = Math.abs(dragged) / camera.lapse;
+  const pphi = (sign * lambda) / camera.axialRadius;
+  const polar = eta + cosTheta * cosTheta * (a * a - (lambda * lambda) / sinSquared(cosTheta));
+  const ptheta = signPtheta * Math.sqrt(Math.max(0, polar) / camera.sigma);
+  const pr = signPr * Math.sqrt(Math.max(0, (pt - pphi) * (pt + pphi) - ptheta * ptheta));
+  return { sign, pt, pr, ptheta, pphi };
+}
+
 /**
  * The direction, in the observer's own rest frame, in which a photon of given constants is seen: the inverse of
- * `receivePhoton` off the axis. Unit vector (n_r, n_θ, n_φ). NaN where no such photon passes.
+ * `receivePhoton` off the axis. Unit vector (n_r, n_θ, n_φ).
  */
-export function directionOfPhoton(
-  camera: Camera,
-  photon: Pick<ReceivedPhoton, "lambda" | "eta" | "signPr" | "signPtheta">,
-): [number, number, number] {
-  const { a, cosTheta, velocity, gamma } = camera;
-  const { lambda, eta } = photon;
-  const sin2 = sinSquared(cosTheta);
-  // Per unit |E|: p^(t) = (1 − ωλ)/α, p^(φ) = λ/√g_φφ, p^(θ)² = Θ/Σ, and p^(r) from p·p = 0. Where 1 − ωλ < 0, E < 0.
-  const dragged = 1 - camera.frameDragging * lambda;
-  const pt = Math.abs(dragged) / camera.lapse;
-  const angular = (dragged < 0 ? -lambda : lambda) / camera.axialRadius;
-  const polar = eta + cosTheta * cosTheta * (a * a - (lambda * lambda) / sin2);
-  const pth = photon.signPtheta * Math.sqrt(Math.max(0, polar) / camera.sigma);
-  const pr = photon.signPr * Math.sqrt(Math.max(0, (pt - angular) * (pt + angular) - pth * pth));
-
-  const along = velocity[0] * pr + velocity[1] * pth + velocity[2] * angular;
+export function directionOfPhoton(camera: Camera, photon: Constants): [number, number, number] {
+  const { velocity, gamma } = camera;
+  const { pt, pr, ptheta, pphi } = zamoMomentum(camera, photon);
+  const along = velocity[0] * pr + velocity[1] * ptheta + velocity[2] * pphi;
   const push = ((gamma * gamma) / (1 + gamma)) * along - gamma * pt;
-  const qt = gamma * (pt - along);
-  const qr = pr + push * velocity[0];
-  const qth = pth + push * velocity[1];
-  const qph = angular + push * velocity[2];
-  return [-qr / qt, -qth / qt, -qph / qt];
+  const seen = gamma * (pt - along);
+  return [
+    -(pr + push * velocity[0]) / seen,
+    -(ptheta + push * velocity[1]) / seen,
+    -(pphi + push * velocity[2]) / seen,
+  ];
 }
 
 /**
