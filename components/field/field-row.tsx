@@ -72,10 +72,10 @@ export function FieldRow(props: FieldRowProps) {
 }
 
 function DepartureMark({ letter }: { letter: string | boolean }) {
+  if (letter === true) return <span className="sr-only">, a departure</span>;
   return (
     <sup className="ml-4 text-ember">
-      <span className="sr-only">, departure </span>
-      {letter === true ? "·" : letter}
+      <span className="sr-only">, departure</span> {letter}
     </sup>
   );
 }

@@ -49,7 +49,7 @@ export function StillIndex({ index, frame, placement }: RulerIndexProps) {
 /** An index that is moved by pointer or keyboard. */
 export function SlidingIndex({ index, rule, frame, placement }: RulerIndexProps) {
   const { value, onChange, onCommit } = index;
-  const { mode, focused, handlers } = useIndex({
+  const { mode, boxed, handlers } = useIndex({
     value,
     rule,
     placement,
@@ -87,10 +87,10 @@ export function SlidingIndex({ index, rule, frame, placement }: RulerIndexProps)
           width={24}
           height={24}
         />
-        {focused && <FocusBox vertical={frame.vertical} />}
+        {boxed && <FocusBox vertical={frame.vertical} />}
         <path className={fills[index.tone ?? "bright"]} d={indexPath(frame.vertical)} />
         {(!index.hideValue || mode.kind === "type") && (
-          <ValueText text={text} frame={frame} beside={focused ? (nearEnd ? "left" : "right") : undefined} />
+          <ValueText text={text} frame={frame} beside={boxed ? (nearEnd ? "left" : "right") : undefined} />
         )}
       </g>
     </>

@@ -65,14 +65,31 @@ function roomyStep(fine: number, coarse: number, { scale, length }: Placement): 
   return coarse;
 }
 
-/** Drops whatever would stand closer than 3 px to a longer tick or to its own kind. */
+/** Long ticks where they are three pixels apart; between two of them the shorter ones all together, or none. */
 function thin(ticks: Tick[]): Tick[] {
-  const kept: Tick[] = [];
-  for (const length of [13, 8, 4.5])
-    for (const tick of ticks)
-      if (tick.length === length && kept.every((other) => Math.abs(other.at - tick.at) >= closest))
-        kept.push(tick);
-  return kept.sort((a, b) => a.at - b.at);
+  const inOrder = [...ticks].sort((a, b) => a.at - b.at);
+  const long: Tick[] = [];
+  for (const tick of inOrder.filter(({ length }) => length === 13))
+    if (tick.at - (long.at(-1)?.at ?? -Infinity) >= closest) long.push(tick);
+  return weave(-Infinity, Infinity, long, inOrder, [8, 4.5]);
+}
+
+/** The posts, and between each two of them the next level's ticks if all have room, and so on down. */
+function weave(low: number, high: number, posts: Tick[], ticks: Tick[], levels: number[]): Tick[] {
+  const ends = [low, ...posts.map(({ at }) => at), high];
+  return ends.slice(1).flatMap((end, index) => {
+    const post = posts[index] ? [posts[index]] : [];
+    return [...fill(ends[index]!, end, ticks, levels), ...post];
+  });
+}
+
+function fill(low: number, high: number, ticks: Tick[], [level, ...finer]: number[]): Tick[] {
+  if (level === undefined) return [];
+  const inside = ticks.filter(({ at }) => at > low && at < high);
+  const own = inside.filter(({ length }) => length === level);
+  const ends = [low, ...own.map(({ at }) => at), high];
+  const cramped = ends.some((at, index) => index > 0 && at - ends[index - 1]! < closest);
+  return cramped ? [] : weave(low, high, own, inside, finer);
 }
 
 /** Leaves out labels that would run into the one before, or into a place that is taken. */

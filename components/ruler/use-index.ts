@@ -1,4 +1,4 @@
-import { useState, type FocusEvent, type KeyboardEvent, type PointerEvent } from "react";
+import { useState, type KeyboardEvent, type PointerEvent } from "react";
 import { valueUnderPointer } from "./drag";
 import { actOnKey, readTyped } from "./keys";
 import { constrain, type IndexRule } from "./rule";
@@ -37,16 +37,16 @@ export function useIndex(control: IndexControl) {
     onPointerMove: (event: PointerEvent<SVGGElement>) => drag(event, control, state),
     // Release and cancellation both end in this, once.
     onLostPointerCapture: () => mode.kind === "drag" && settle(control.value, control, state),
-    onFocus: (event: FocusEvent<SVGGElement>) => {
+    onFocus: () => {
       setBefore(control.value);
-      setFocused(event.currentTarget.matches(":focus-visible"));
+      setFocused(true);
     },
     onBlur: () => {
       setFocused(false);
       leave(control, state);
     },
   };
-  return { mode, focused, handlers };
+  return { mode, boxed: focused && mode.kind !== "drag", handlers };
 }
 
 function settle(next: number, { value, onChange, onCommit }: IndexControl, { setMode }: IndexState) {

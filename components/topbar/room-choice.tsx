@@ -13,8 +13,7 @@ export function RoomChoice({ native, room, onChoose }: RoomChoiceProps) {
     <form action={onChoose}>
       <input type="hidden" name="native" value={native} />
       <button type="submit" className="action cursor-pointer text-soft">
-        Read <span className="max-sm:sr-only">this page </span>
-        {room === "desk" ? "dark" : "light"}
+        Read <span className="max-sm:sr-only">this page</span> {room === "desk" ? "dark" : "light"}
       </button>
     </form>
   );
