@@ -1,16 +1,8 @@
 // Black-body radiation in SI units. Symbols follow Rybicki & Lightman (1979), section 1.5.
-
-/** Exact SI values (CGPM 2018). */
-export const planckConstant = 6.62607015e-34;
-export const lightSpeed = 299_792_458;
-export const boltzmannConstant = 1.380649e-23;
+import { boltzmannK, planckH, speedOfLight, stefanBoltzmann } from "../units";
 
 /** c₂ = hc/k in m K. Tables older than 2019 use 1.4388e-2 or 1.435e-2. */
-export const secondRadiationConstant = (planckConstant * lightSpeed) / boltzmannConstant;
-
-/** σ = 2π⁵k⁴/(15h³c²) in W m⁻² K⁻⁴ (Stefan 1879, Boltzmann 1884). */
-export const stefanBoltzmannConstant =
-  (2 * Math.PI ** 5 * boltzmannConstant ** 4) / (15 * planckConstant ** 3 * lightSpeed ** 2);
+export const secondRadiationConstant = (planckH * speedOfLight) / boltzmannK;
 
 /**
  * Spectral radiance by frequency, B_ν(T) = 2hν³/c² / (exp(hν/kT) − 1) (Planck 1901), in W m⁻² Hz⁻¹ sr⁻¹.
@@ -18,8 +10,8 @@ export const stefanBoltzmannConstant =
  * g³ B_{ν/g}(T) = B_ν(gT), so shift either the spectrum or the temperature, never both.
  */
 export function planckByFrequency(frequencyHz: number, temperatureK: number): number {
-  const exponent = (planckConstant * frequencyHz) / (boltzmannConstant * temperatureK);
-  return (2 * planckConstant * frequencyHz ** 3) / lightSpeed ** 2 / Math.expm1(exponent);
+  const exponent = (planckH * frequencyHz) / (boltzmannK * temperatureK);
+  return (2 * planckH * frequencyHz ** 3) / speedOfLight ** 2 / Math.expm1(exponent);
 }
 
 /**
@@ -31,12 +23,10 @@ export function planckByWavelength(
   temperatureK: number,
   c2 = secondRadiationConstant,
 ): number {
-  return (
-    (2 * planckConstant * lightSpeed ** 2) / wavelengthM ** 5 / Math.expm1(c2 / (wavelengthM * temperatureK))
-  );
+  return (2 * planckH * speedOfLight ** 2) / wavelengthM ** 5 / Math.expm1(c2 / (wavelengthM * temperatureK));
 }
 
 /** Radiance of a black body over all frequencies, σT⁴/π, in W m⁻² sr⁻¹; its flux is π times that. */
 export function blackBodyRadiance(temperatureK: number): number {
-  return (stefanBoltzmannConstant * temperatureK ** 4) / Math.PI;
+  return (stefanBoltzmann * temperatureK ** 4) / Math.PI;
 }

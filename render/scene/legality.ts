@@ -1,6 +1,7 @@
 // Where a camera or a disk may not be, and the words that say why (FIELD §4, "Camera legality").
 import { ergosurface, iscoRadius, outerHorizon, photonOrbit } from "../spacetime/orbits";
-import type { Setup } from "./setup";
+import { horizonFrame } from "./camera";
+import { maximumFrames, type Setup } from "./setup-fields";
 
 export interface Forbidden {
   path: (string | number)[];
@@ -15,6 +16,7 @@ export function findForbidden(setup: Setup): Forbidden[] {
     ...forbiddenCamera(setup),
     ...forbiddenDisk(setup),
     ...forbiddenFrames(setup),
+    ...forbiddenFall(setup),
     ...forbiddenRaster(setup),
   ];
 }
@@ -73,14 +75,23 @@ function forbiddenFrames({ time }: Setup): Forbidden[] {
   const count = time.last - time.first + 1;
   if (count < 1)
     return [{ path: ["time", "last"], message: "The last frame must not come before the first." }];
-  if (count > 20_000)
+  if (count > maximumFrames)
     return [
       {
         path: ["time", "last"],
-        message: `${count} frames are more than one shot may hold, 20,000. Split the shot.`,
+        message: `${count} frames are more than one shot may hold, ${maximumFrames.toLocaleString("en")}. Split the shot.`,
       },
     ];
   return [];
+}
+
+function forbiddenFall(setup: Setup): Forbidden[] {
+  const { hole, camera, time } = setup;
+  if (camera.observer !== "falling" || camera.radius <= outerHorizon(hole.spin)) return [];
+  const reached = horizonFrame(setup);
+  if (time.last < reached) return [];
+  const message = `The falling camera reaches the horizon at frame ${reached}. End before that frame, or begin farther out.`;
+  return [{ path: ["time", "last"], message }];
 }
 
 function forbiddenRaster({ camera, picture }: Setup): Forbidden[] {

@@ -1,5 +1,12 @@
 // From scene-linear light to what a screen is sent.
 
+export const displayCurves = ["none", "reinhard"] as const;
+/** How a PNG shows light brighter than white: cut, or compressed so that 16 times white is still shown. */
+export type DisplayCurve = (typeof displayCurves)[number];
+
+/** The luminance that the compressing curve shows as white. */
+export const curveWhite = 16;
+
 /**
  * sRGB encoding of a linear value (IEC 61966-2-1): 12.92 L up to 0.0031308, then 1.055 L^(1/2.4) − 0.055.
  * Values outside 0 to 1 are the caller's to clamp.

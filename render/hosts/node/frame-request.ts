@@ -2,6 +2,7 @@
 import type { Setup } from "../../scene/setup";
 import type { ColourSpace } from "../../shade/colour-spaces";
 import type { Quality } from "../../shade/quality";
+import type { DisplayCurve } from "../../shade/transfer";
 
 export interface FrameRequest {
   frame: number;
@@ -10,6 +11,8 @@ export interface FrameRequest {
   /** SHA-256 (hexadecimal) of the canonical setup, written into the OpenEXR file. */
   setupDigest: string;
   kernelVersion: string;
+  /** How the PNG shows light brighter than white; "none" unless said. The OpenEXR file never has a curve. */
+  displayCurve?: DisplayCurve;
   /** Aborting stops the frame within a fraction of a second; renderFrame then rejects with the signal's reason. */
   signal?: AbortSignal;
   /** Told the share of the frame that is done, 0 to 1, never going back. */

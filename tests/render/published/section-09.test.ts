@@ -5,8 +5,8 @@ import {
   planckByFrequency,
   planckByWavelength,
   secondRadiationConstant,
-  stefanBoltzmannConstant,
 } from "@/render/emission/planck";
+import { stefanBoltzmann } from "@/render/units";
 import { sumBlackBody, type SumRule } from "@/render/shade/black-body-colour";
 import { apply, invert, primaries, rgbToRgb, rgbToXyz } from "@/render/shade/colour-spaces";
 import { encodeSrgb } from "@/render/shade/transfer";
@@ -95,7 +95,7 @@ function checkShiftedBody(entry: Entry) {
 function checkReferenceBody(entry: Entry) {
   const T = numberIn(entry, "T");
   const expected = numbers(entry.expected);
-  expectWithin(entry, "flux", stefanBoltzmannConstant * T ** 4, expected.sigmaT4!);
+  expectWithin(entry, "flux", stefanBoltzmann * T ** 4, expected.sigmaT4!);
   expectWithin(entry, "radiance", blackBodyRadiance(T), expected.radiance!);
   const longest = peakOf((wavelength) => planckByWavelength(wavelength, T), 1e-8, 1e-5);
   expectWithin(entry, "peak wavelength", longest, expected.lambda_peak_m!);
