@@ -11,5 +11,7 @@ export function openDatabase(url: string, connections = 10): Database {
   const pool = new pg.Pool({ connectionString: url, max: connections });
   // A connection that dies while idle (a restarted server) is replaced at the next query; without a listener it would end the process.
   pool.on("error", () => undefined);
+  // So is one that dies within a transaction, between two of its queries: the next query fails, and the transaction with it.
+  pool.on("connect", (client) => client.on("error", () => undefined));
   return drizzle(pool, { schema });
 }
