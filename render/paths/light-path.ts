@@ -24,6 +24,18 @@ export interface PathStart {
   signPtheta: 1 | -1;
 }
 
+export interface TraceOptions {
+  /** Bound on a step's last kept terms, relative to the coordinate's own scale. */
+  tolerance?: number;
+  /** False leaves dt at zero and costs less. */
+  withTime?: boolean;
+  /** Stop, with fate `stopped`, at the crossing of this number. */
+  stopAfterCrossings?: number;
+  /** Stop, with fate `stopped`, at the first crossing whose radius is within [stopInner, stopOuter]: an opaque disk. */
+  stopInner?: number;
+  stopOuter?: number;
+}
+
 /**
  * The outcome of one path. Arrays hold the first `crossingCount` crossings of the equatorial plane.
  * dphi = φ(event) − φ(observer), continuous; dt = t(observer) − t(event) ≥ 0; signs are the future-directed photon's.
