@@ -73,7 +73,7 @@ describe("paths on the command line refuses, in one line each,", () => {
     ],
     [
       "light that cannot be there",
-      JSON.stringify([{ ...good, a: 0, r_obs: 10, lambda: 100, eta: 1e4 }]),
+      JSON.stringify([{ ...good, a: 0, r_obs: 10, cos_theta_obs: 0, lambda: 100, eta: 1e4 }]),
       ["rays[0].eta: No light of these constants passes this radius: R(r) is negative there."],
     ],
   ];

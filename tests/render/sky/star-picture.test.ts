@@ -7,6 +7,7 @@ import { buildSky } from "@/lib/local/build-sky";
 import { pixelSolidAngle } from "@/render/scene/lenses";
 import { sumBlackBody } from "@/render/shade/black-body-colour";
 import { planFrame } from "@/render/shade/frame-plan";
+import type { Quality } from "@/render/shade/quality";
 import { renderTile } from "@/render/shade/render-tile";
 import { colourTemperature, decodeCatalogue, type Star } from "@/render/sky/catalogue";
 import { magnitudeZeroSolidAngle } from "@/render/sky/star-field";
@@ -21,19 +22,19 @@ beforeAll(async () => {
 });
 afterAll(() => rmSync(folder, { recursive: true }));
 
-function photograph(changes: Changes, stars: readonly Star[]) {
+function photograph(changes: Changes, stars: readonly Star[], quality: Quality = "proof") {
   const setup = smallSetup({ disk: null, ...changes, sky: { kind: "stars", ...changes.sky } });
   const { width, height } = setup.picture;
-  const { rgba } = renderTile(planFrame(setup, setup.time.first, "proof", "rec709", stars), 0, height);
+  const { rgba } = renderTile(planFrame(setup, setup.time.first, quality, "rec709", stars), 0, height);
   const luminance = Float64Array.from(
     { length: width * height },
     (_, i) => 0.2126 * rgba[4 * i]! + 0.7152 * rgba[4 * i + 1]! + 0.0722 * rgba[4 * i + 2]!,
   );
-  return { setup, width, height, luminance };
+  return { setup, width, height, rgba, luminance };
 }
 
 describe("a distant camera without a bending hole in its view", () => {
-  const fieldDeg = 50;
+  const fieldDeg = 30;
   // At φ = 0 and yaw 97° the camera looks to φ = 180° − 97° = 83°: right ascension 83°, on the equator.
   const aim = { raDeg: 83, decDeg: 0 };
   const changes: Changes = {
@@ -70,6 +71,14 @@ describe("a distant camera without a bending hole in its view", () => {
     return [sumX / sum, sumY / sum];
   }
 
+  /** The brightest pixel, and the brightest that is not part of the same star. */
+  function brightestTwo(luminance: Float64Array, width: number) {
+    const order = [...luminance.keys()].sort((a, b) => luminance[b]! - luminance[a]!);
+    const apart = (a: number, b: number) =>
+      Math.hypot((a % width) - (b % width), Math.floor(a / width) - Math.floor(b / width));
+    return [order[0]!, order.find((i) => apart(i, order[0]!) > 5)!] as const;
+  }
+
   // Betelgeuse and Rigel (HIP 27989, 24436): positions from memory, Hipparcos catalogue (ESA 1997).
   const named = {
     Betelgeuse: { raDeg: 88.793, decDeg: 7.407 },
@@ -92,13 +101,16 @@ describe("a distant camera without a bending hole in its view", () => {
   });
 
   it("shows them as the two brightest stars there, Betelgeuse redder", () => {
-    const { luminance, width } = photograph(changes, catalogue);
-    const brightest = [...luminance.keys()].sort((a, b) => luminance[b]! - luminance[a]!).slice(0, 2);
+    const { rgba, luminance, width } = photograph(changes, catalogue);
     const places = Object.values(named).map(pixelOf);
-    for (const i of brightest) {
-      const near = places.some(([x, y]) => Math.hypot((i % width) - x, Math.floor(i / width) - y) < 1.5);
-      expect(near).toBe(true);
-    }
+    const [i, j] = brightestTwo(luminance, width);
+    for (const [x, y] of places)
+      expect([i, j].some((k) => Math.hypot((k % width) - x, Math.floor(k / width) - y) < 1.5)).toBe(true);
+    const redness = ([x, y]: readonly [number, number]) => {
+      const k = 4 * (Math.round(y) * width + Math.round(x));
+      return rgba[k]! / rgba[k + 2]!;
+    };
+    expect(redness(places[0]!)).toBeGreaterThan(3 * redness(places[1]!));
   });
 
   it("gives a star the light of its magnitude, within two per cent", () => {
@@ -116,6 +128,7 @@ describe("a distant camera without a bending hole in its view", () => {
 describe("a star behind the hole", () => {
   // PHYSICS §11: a held camera at r = 50, a = 0; seen at 0.405518734 rad from the hole, a star stands at azimuth
   // 2.961896402878 and is magnified 1.32218557402 times.
+  // At master quality: bending narrows the image so much that one path a pixel is too few for three per cent.
   it("is magnified, and shifted by the camera's height, as the closed form says, within three per cent", () => {
     const star = { raDeg: 2.961896402878 / radians, decDeg: 0, magnitude: 0, colourIndex: 0.65 };
     const lens = { kind: "rectilinear", horizontalFieldDeg: 5 } as const;
@@ -124,7 +137,7 @@ describe("a star behind the hole", () => {
       camera: { radius: 50, inclinationDeg: 90, yawDeg: 0.405518734 / radians, lens },
       picture: { width: 200, height: 200 },
     };
-    const { setup, luminance, width } = photograph(changes, [star]);
+    const { setup, luminance, width } = photograph(changes, [star], "master");
     let [light, sumX] = [0, 0];
     luminance.forEach((value, i) => {
       const here = value * pixelSolidAngle(lens, setup.picture, i % width, Math.floor(i / width));
