@@ -34,6 +34,9 @@ export async function listSigned(ctx: Ctx, input: z.infer<typeof productionIdSch
 
 export type SignedRun = Awaited<ReturnType<typeof listSigned>>["runs"][number];
 
+const bytesOf = (kind: "png" | "exr") =>
+  sql<number>`coalesce(sum(${frameFiles.bytes}) filter (where ${frameFiles.kind} = ${kind}), 0)::float8`;
+
 // Consecutive frames under one verdict share (frame − rank among that verdict's frames).
 async function findSignedRuns(ctx: Ctx, productionId: string) {
   const standing = ctx.db
@@ -49,8 +52,6 @@ async function findSignedRuns(ctx: Ctx, productionId: string) {
     .innerJoin(versions, eq(versions.id, standingVerdicts.versionId))
     .where(and(eq(versions.productionId, productionId), eq(standingVerdicts.kind, "signed off")))
     .as("standing");
-  const bytesOf = (kind: "png" | "exr") =>
-    sql<number>`coalesce(sum(${frameFiles.bytes}) filter (where ${frameFiles.kind} = ${kind}), 0)::float8`;
   return ctx.db
     .select({
       version: standing.versionId,
