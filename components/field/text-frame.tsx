@@ -10,7 +10,7 @@ export interface TextFrameProps {
 }
 
 export const textBox =
-  "w-full min-w-0 rounded border bg-raised text-text outline-none focus:border-bright focus:outline-1 focus:-outline-offset-2 focus:outline-bright " +
+  "w-full min-w-0 rounded border bg-raised text-text outline-none focus:border-bright focus:outline-1 focus:outline-solid focus:-outline-offset-2 focus:outline-bright " +
   "disabled:border-dashed disabled:border-rule disabled:bg-transparent disabled:text-soft aria-invalid:border-double aria-invalid:border-b-3 aria-invalid:border-ember";
 
 /** The label above and the line beneath words that are written into a box. */

@@ -20,7 +20,9 @@ export function placeScale(scale: RulerScale, length: number): Placement {
   const map = (scale.kind === "log" ? scaleLog() : scaleLinear())
     .domain([scale.from, scale.to])
     .range([0, length]);
-  return { scale, length, at: map, valueAt: map.invert };
+  // Logarithms differ in their last bit between a server and a browser; a thousandth of a pixel is the same in both.
+  const at = (value: number) => Math.round(map(value) * 1000) / 1000;
+  return { scale, length, at, valueAt: map.invert };
 }
 
 /** The middle of the nearest pixel, where a hairline is one pixel wide and not two. */
