@@ -5,7 +5,7 @@ import { ensureCluster, findPostmaster, stopCluster } from "./postgres-cluster.m
 import { choosePlace } from "./postgres-place.mjs";
 import { Refusal } from "./refusal.mjs";
 import { ensureSecrets } from "./secrets.mjs";
-import { databaseUrl, ensureAppRole } from "./sql.mjs";
+import { databaseUrl, dropDatabase, ensureAppRole, runSql } from "./sql.mjs";
 import { ensureTemplate } from "./template.mjs";
 
 // Tests throw their databases away, so nothing is gained by waiting for the disk.
@@ -37,6 +37,7 @@ export async function raiseTestCluster(root) {
       logFile: join(testFolder(root), "logs", "database.log"),
       settings: SETTINGS,
     });
+    if (cluster.startedHere) await dropLeftovers(cluster);
     await ensureAppRole(cluster, password);
     await ensureTemplate(root, cluster, password);
     const url = databaseUrl(cluster.port, "postgres", password, "postgres");
@@ -45,6 +46,15 @@ export async function raiseTestCluster(root) {
   } finally {
     release();
   }
+}
+
+/**
+ * Databases of test files that were killed. Only over a server just started: nobody can be using them yet.
+ * @param {import("./postgres-cluster.mjs").Cluster} cluster
+ */
+async function dropLeftovers(cluster) {
+  const names = await runSql(cluster, "SELECT datname FROM pg_database WHERE starts_with(datname, 'test_')");
+  for (const name of names.split("\n").filter(Boolean)) await dropDatabase(cluster, name);
 }
 
 /** @param {string} root @returns {Promise<boolean>} whether it was running */
