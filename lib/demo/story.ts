@@ -63,9 +63,9 @@ function filmSetup(change: Change): Setup {
     hole: { ...defaultSetup.hole, ...hole },
     camera: { ...defaultSetup.camera, ...camera },
     disk: disk === null ? null : { ...defaultSetup.disk!, ...disk },
-    sky: { ...defaultSetup.sky, ...sky },
+    sky: { ...defaultSetup.sky, starStops: 6, ...sky },
     time: { ...defaultSetup.time, last: defaultSetup.time.first + frames - 1 },
-    picture: { ...defaultSetup.picture, ...filmRaster, ...picture },
+    picture: { ...defaultSetup.picture, exposureStops: -0.7, ...filmRaster, ...picture },
   };
 }
 
@@ -230,7 +230,7 @@ export const productions: StoryProduction[] = [
               hole: { spin: 0 },
               camera: { radius: 15, inclinationDeg: 60, pitchDeg: -50 },
               disk: null,
-              sky: { starStops: 2 },
+              sky: { starStops: 8 },
             }),
             words: "Nothing but bent starlight; the dark has the size Synge gives for this distance.",
           },
