@@ -4,8 +4,8 @@ import { stepLimit, stride } from "./path-work";
 import { slopeAt, valueAt, whereEquals, whereTurns } from "./polynomials";
 import { expandSeries, order, terms } from "./series";
 
-/** Two digits inside what the published check values ask for; a picture could do with less. */
-const defaultTolerance = 1e-11;
+/** Within every published check value; a picture could do with a hundred times more. */
+const defaultTolerance = 1e-12;
 
 /** Traces (u, μ) until the path is lost, escapes, is stopped or given up. */
 export function followPath(record: PathRecord, options: TraceOptions): void {

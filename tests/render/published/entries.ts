@@ -60,3 +60,41 @@ export function expectWithin(
   const message = `${entry.id} ${what}: ${actual} against ${expected}, allowed ${allowed}`;
   expect(Math.abs(actual - expected) <= allowed, message).toBe(true);
 }
+
+/**
+ * Fails unless `actual` has every number and word of the entry's expected value, each number within its allowance.
+ * A crossing's own `condition` applies to the numbers beside it.
+ */
+export function expectAgreement(
+  entry: Entry,
+  actual: unknown,
+  expected: Given = entry.expected,
+  what = "value",
+  condition = 1,
+): void {
+  if (typeof expected === "number") expectWithin(entry, what, actual as number, expected, condition);
+  else if (typeof expected !== "object" || expected === null)
+    expect(actual, `${entry.id} ${what}`).toBe(expected);
+  else {
+    const own = "condition" in expected ? (expected as { condition: number }).condition : condition;
+    if (Array.isArray(expected)) expect(actual, `${entry.id} ${what}`).toHaveLength(expected.length);
+    for (const [name, value] of Object.entries(expected))
+      if (name !== "condition")
+        expectAgreement(entry, (actual as Record<string, unknown>)[name], value, `${what}.${name}`, own);
+  }
+}
+
+/** Runs one check per entry of a section, chosen by the middle word of its id; an unknown kind fails its test. */
+export function checksOf(section: number, kinds: Record<string, (entry: Entry) => unknown>) {
+  return entriesOf(section).map((entry) => {
+    const kind = entry.id.split("-")[1] ?? "";
+    return {
+      name: nameOf(entry),
+      run: () => {
+        const evaluate = kinds[kind];
+        if (!evaluate) throw new Error(`${entry.id}: no check is written for this kind of entry`);
+        expectAgreement(entry, evaluate(entry));
+      },
+    };
+  });
+}
