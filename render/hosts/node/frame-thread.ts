@@ -45,16 +45,19 @@ function starCatalogue(): Star[] {
   }
 }
 
-// The last frame's plan is kept: its other tiles will be asked for next.
-let planned: { key: string; plan: FramePlan } | undefined;
+// Frames in hand keep their plans: their other tiles will be asked for next.
+const plans = new Map<string, FramePlan>();
+const plansKept = 4;
 
 function planOf({ setup, frame, quality, colourSpace }: TileTask): FramePlan {
   const key = canonicalJson([setup, frame, quality, colourSpace]);
-  if (planned?.key !== key) {
-    const stars = setup.sky.kind === "stars" ? starCatalogue() : null;
-    planned = { key, plan: planFrame(setup, frame, quality, colourSpace, stars) };
-  }
-  return planned.plan;
+  const known = plans.get(key);
+  if (known) return known;
+  const stars = setup.sky.kind === "stars" ? starCatalogue() : null;
+  const plan = planFrame(setup, frame, quality, colourSpace, stars);
+  for (const oldest of plans.keys()) if (plans.size >= plansKept) plans.delete(oldest);
+  plans.set(key, plan);
+  return plan;
 }
 
 export function traceTile(task: TileTask): TileResult {
