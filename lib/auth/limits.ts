@@ -5,6 +5,7 @@ import { RateLimiterPostgres, RateLimiterRedis, RateLimiterRes } from "rate-limi
 import type { Database } from "@/db/client";
 import { environment } from "../environment";
 import { DomainError } from "../errors";
+import { log } from "../log";
 import { wordsOfWait } from "./wait";
 
 const minute = 60;
@@ -67,7 +68,7 @@ function limiterOf(db: Database, limit: Limit): Limiter {
 function makeLimiter(db: Database, limit: Limit): Limiter {
   const options = { ...limits[limit], keyPrefix: limit };
   const { REDIS_URL } = environment();
-  if (REDIS_URL) return new RateLimiterRedis({ ...options, storeClient: (redis ??= new Redis(REDIS_URL)) });
+  if (REDIS_URL) return new RateLimiterRedis({ ...options, storeClient: (redis ??= openRedis(REDIS_URL)) });
   return new RateLimiterPostgres({
     ...options,
     storeClient: db.$client,
@@ -75,4 +76,11 @@ function makeLimiter(db: Database, limit: Limit): Limiter {
     tableName: "rate_limits",
     tableCreated: true,
   });
+}
+
+// A lost Redis refuses the try at once rather than let it wait, or let it through uncounted.
+function openRedis(url: string): Redis {
+  const client = new Redis(url, { maxRetriesPerRequest: 1 });
+  client.on("error", (error) => log.warn({ err: error }, "the counts of tries cannot be reached"));
+  return client;
 }

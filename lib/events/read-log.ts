@@ -36,8 +36,6 @@ export async function readLog(ctx: Ctx, { production: chain, before }: z.infer<t
   };
 }
 
-export type LogPage = Awaited<ReturnType<typeof readLog>>;
-
 /** The database recomputes every hash: how many lines there are, and the first that does not follow from the one before. */
 export async function checkChain(
   db: Database,

@@ -31,8 +31,6 @@ export async function listPeople({ db, actor }: Ctx) {
   };
 }
 
-export type PeopleList = Awaited<ReturnType<typeof listPeople>>;
-
 async function readMembers(db: Database, scope: string[]) {
   const rows = await db
     .select({

@@ -15,7 +15,7 @@ describe("a session", () => {
     const given = {
       session: { expires: "" },
       token: made,
-      user,
+      user: { ...user, emailVerified: null },
       newSession: null,
       trigger: "update" as const,
     };
