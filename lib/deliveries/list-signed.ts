@@ -32,7 +32,8 @@ export async function listSigned(ctx: Ctx, input: z.infer<typeof productionIdSch
   };
 }
 
-export type SignedRun = Awaited<ReturnType<typeof listSigned>>["runs"][number];
+export type SignedRuns = Awaited<ReturnType<typeof listSigned>>;
+export type SignedRun = SignedRuns["runs"][number];
 
 const bytesOf = (kind: "png" | "exr") =>
   sql<number>`coalesce(sum(${frameFiles.bytes}) filter (where ${frameFiles.kind} = ${kind}), 0)::float8`;

@@ -25,7 +25,8 @@ export async function listQueue(ctx: Ctx) {
   };
 }
 
-export type QueueItem = Awaited<ReturnType<typeof listQueue>>["items"][number];
+export type ReviewQueue = Awaited<ReturnType<typeof listQueue>>;
+export type QueueItem = ReviewQueue["items"][number];
 
 async function findQueue(db: Database, scope: string[]) {
   if (scope.length === 0) return [];
