@@ -98,7 +98,10 @@ function Named({ name, email }: { name: string; email: string }) {
   return (
     <Cell className="py-8">
       {name}
-      <span className="type-small block break-all text-soft">{email}</span>
+      <span className="type-small block text-soft wrap-anywhere">
+        {email.split("@")[0]}
+        <wbr />@{email.split("@")[1]}
+      </span>
     </Cell>
   );
 }
