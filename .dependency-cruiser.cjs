@@ -19,7 +19,8 @@ module.exports = {
       severity: "error",
       from: {
         orphan: true,
-        pathNot: "(^tests/|\\.d\\.ts$|^[^/]+\\.(ts|mjs|cjs)$|^app/.*(page|layout|route|error|not-found|loading)\\.tsx?$)",
+        pathNot:
+          "(^tests/|\\.d\\.ts$|^[^/]+\\.(ts|mjs|cjs)$|^app/.*(page|layout|route|error|not-found|loading)\\.tsx?$)",
       },
       to: {},
     },

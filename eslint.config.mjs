@@ -11,7 +11,10 @@ const noServicesInRender = {
   files: ["render/**/*.{ts,tsx}"],
   ignores: ["render/hosts/**", "render/cli.ts"],
   rules: {
-    "no-restricted-imports": ["error", { patterns: ["node:*", "react", "react-dom", "next", "next/*", "drizzle-orm*", "pg"] }],
+    "no-restricted-imports": [
+      "error",
+      { patterns: ["node:*", "react", "react-dom", "next", "next/*", "drizzle-orm*", "pg"] },
+    ],
     "no-restricted-globals": [
       "error",
       { name: "process", message: "render is pure: take the value as an argument." },
@@ -39,8 +42,14 @@ const config = [
   },
   noServicesInRender,
   // Numerical kernels are paragraphed; components are mostly markup; tests are lists of sentences.
-  { files: ["render/**/*.ts"], rules: { "max-lines-per-function": ["error", { max: 90, skipBlankLines: true, skipComments: true }] } },
-  { files: ["**/*.tsx"], rules: { "max-lines-per-function": ["error", { max: 110, skipBlankLines: true, skipComments: true }] } },
+  {
+    files: ["render/**/*.ts"],
+    rules: { "max-lines-per-function": ["error", { max: 90, skipBlankLines: true, skipComments: true }] },
+  },
+  {
+    files: ["**/*.tsx"],
+    rules: { "max-lines-per-function": ["error", { max: 110, skipBlankLines: true, skipComments: true }] },
+  },
   { files: ["tests/**", "db/schema/**"], rules: { "max-lines-per-function": "off" } },
   { files: ["lib/local/**", "render/cli.ts", "render/hosts/speed.ts"], rules: { "no-console": "off" } },
   { files: dataTables, rules: { "max-lines": "off" } },

@@ -5,7 +5,13 @@ const alias = { "@": import.meta.dirname };
 
 const node = (name: string, extra: object = {}) => ({
   resolve: { alias },
-  test: { name, environment: "node" as const, include: [`tests/${name}/**/*.test.ts`], testTimeout: 60_000, ...extra },
+  test: {
+    name,
+    environment: "node" as const,
+    include: [`tests/${name}/**/*.test.ts`],
+    testTimeout: 60_000,
+    ...extra,
+  },
 });
 
 export default defineConfig({

@@ -51,6 +51,7 @@ export function parseInput<T extends z.ZodType>(schema: T, input: unknown): z.in
 
 /** The row, or a "not found" that says what was looked for. Used where another production's thing must not be told apart from none. */
 export function found<T>(row: T | undefined, what: string): T {
-  if (row === undefined) throw new DomainError("not-found", `There is no such ${what}, or it is not yours to see.`);
+  if (row === undefined)
+    throw new DomainError("not-found", `There is no such ${what}, or it is not yours to see.`);
   return row;
 }
