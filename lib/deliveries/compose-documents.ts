@@ -3,6 +3,7 @@ import { createHash } from "node:crypto";
 import { composeReadme } from "./compose-readme";
 import { composeScienceNote } from "./compose-science-note";
 import { setName } from "./lay-out";
+import type { Packed } from "./packed";
 import type { PlannedItem } from "./plan-delivery";
 
 export interface DeliveryDocument {
@@ -10,14 +11,6 @@ export interface DeliveryDocument {
   body: string;
   sha256: string;
   bytes: number;
-}
-
-export interface Packed {
-  production: string;
-  number: number;
-  title: string;
-  words: string;
-  items: PlannedItem[];
 }
 
 export const manifestPath = "manifest-sha256.txt";

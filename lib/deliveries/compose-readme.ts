@@ -1,4 +1,4 @@
-import type { Packed } from "./compose-documents";
+import type { Packed } from "./packed";
 import { wrapText } from "./wrap-text";
 
 /** How to check, on any machine, that what arrived is what was signed. */

@@ -1,7 +1,7 @@
 import { describeSetup } from "../reviews/describe-setup";
 import { frameWords } from "../reviews/schema-declaration";
 import { setupFromJson } from "@/render/scene/parse-setup";
-import type { Packed } from "./compose-documents";
+import type { Packed } from "./packed";
 import type { PlannedItem } from "./plan-delivery";
 import { cautions, chosen, computed, omitted } from "./science-words";
 import { wrapText } from "./wrap-text";

@@ -13,7 +13,7 @@ import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { Readable } from "node:stream";
 import { checkName, hashOf, missing, spool } from "./content";
-import type { ByteRange, Storage, StoredFile } from "./storage";
+import type { ByteRange, Storage, StoredFile } from "./stored-file";
 
 export interface Bucket {
   bucket: string;

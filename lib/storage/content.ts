@@ -5,7 +5,7 @@ import { open } from "node:fs/promises";
 import { Readable, Transform } from "node:stream";
 import { pipeline } from "node:stream/promises";
 import { DomainError } from "../errors";
-import type { StoredFile } from "./storage";
+import type { StoredFile } from "./stored-file";
 
 /** Refuses anything that is not a name of ours, so that no name can lead out of the folder. */
 export function checkName(sha256: string): string {

@@ -3,7 +3,7 @@ import { mkdir, open, readdir, rename, rm, stat } from "node:fs/promises";
 import { join } from "node:path";
 import type { Readable } from "node:stream";
 import { checkName, flush, hashOf, missing, spool } from "./content";
-import type { ByteRange, Storage, StoredFile } from "./storage";
+import type { ByteRange, Storage, StoredFile } from "./stored-file";
 
 /** A folder as ab/cd…; a file appears under its name only when it is whole and on the disk. */
 export function folderStorage(root: string): Storage {

@@ -8,7 +8,7 @@ import S3rver from "s3rver";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { bucketStorage } from "@/lib/storage/bucket";
 import { folderStorage, sweepIncoming } from "@/lib/storage/folder";
-import type { Storage } from "@/lib/storage/storage";
+import type { Storage } from "@/lib/storage/stored-file";
 
 const sha256 = (bytes: Uint8Array) => createHash("sha256").update(bytes).digest("hex");
 const content = Buffer.from("a frame of a black hole, as bytes");

@@ -1,6 +1,6 @@
 // A stored file as an answer: it never changes, so a browser may keep it; but only the one that was let in.
 import { Readable } from "node:stream";
-import type { ByteRange } from "@/lib/storage/storage";
+import type { ByteRange } from "@/lib/storage/stored-file";
 import type { OpenFile } from "@/lib/versions/open-frame-file";
 
 const contentTypes = { png: "image/png", exr: "image/x-exr" } as const;
