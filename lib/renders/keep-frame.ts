@@ -4,7 +4,7 @@ import type { FileKind } from "@/db/enums";
 import { frameFiles, frames, renders } from "@/db/schema/versions";
 import type { RenderedFrame } from "@/render/hosts/node/frame-request";
 import { announce } from "../events/record";
-import type { Storage, StoredFile } from "../stored-file/stored-file";
+import type { Storage, StoredFile } from "../storage/stored-file";
 import { FrameFailure, storageFailure } from "./frame-failure";
 import type { FramePlan } from "./frame-plan";
 

@@ -5,7 +5,7 @@ import { setupFromJson } from "@/render/scene/parse-setup";
 import type { Setup } from "@/render/scene/setup";
 import { announce } from "../events/record";
 import { log } from "../log";
-import type { Storage } from "../stored-file/stored-file";
+import type { Storage } from "../storage/stored-file";
 import type { StopWatch } from "./cancellations";
 import { failRender } from "./fail-render";
 import { FrameFailure } from "./frame-failure";

@@ -7,7 +7,7 @@ import type { Setup } from "@/render/scene/setup";
 import type { Ctx } from "../context";
 import { found } from "../errors";
 import { storage } from "../storage/storage";
-import type { ByteRange } from "../stored-file/stored-file";
+import type { ByteRange } from "../storage/stored-file";
 import { fileStem } from "./frame-names";
 import { findVersion } from "./find-version";
 import { nameVersion } from "./name-version";
