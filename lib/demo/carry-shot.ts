@@ -12,6 +12,7 @@ import { createSequence } from "../shots/create-sequence";
 import { createShot } from "../shots/create-shot";
 import { cancelVersion } from "../versions/cancel-version";
 import { renderVersion } from "../versions/render-version";
+import { resumeVersion } from "../versions/resume-version";
 import { deliverShot } from "./deliver-shot";
 import { judgeVersion } from "./judge-version";
 import { as, type Stage, type VersionRow } from "./stage";
@@ -91,17 +92,19 @@ async function findOrRender(stage: Stage, story: StoryShot, shotId: string): Pro
 }
 
 /** The frames of "rendering" are left to the worker, which begins when the studio opens. */
-async function finishFrames(stage: Stage, { fate }: StoryShot, version: VersionRow): Promise<void> {
+async function finishFrames(stage: Stage, { fate, code }: StoryShot, version: VersionRow): Promise<void> {
   if (fate === "rendering") return;
   const { id: versionId, first, last } = version;
-  const [render] = await stage.shop.db.select().from(renders).where(eq(renders.versionId, versionId));
-  if (render!.state !== "rendering") return;
-  await runFrameJob(stage.shop, {
-    versionId,
-    attempt: 1,
-    first,
-    last: fate === "stopped" ? first + 1 : last,
-  });
+  const read = async () => {
+    const [render] = await stage.shop.db.select().from(renders).where(eq(renders.versionId, versionId));
+    return render!;
+  };
+  if ((await read()).state === "failed") await resumeVersion(as(stage, "artist"), { version: versionId });
+  const { state, attempt } = await read();
+  if (state !== "rendering") return;
+  await runFrameJob(stage.shop, { versionId, attempt, first, last: fate === "stopped" ? first + 1 : last });
+  const { failure } = await read();
+  if (failure) throw new Error(`${code} could not be rendered. ${failure}`);
   if (fate === "stopped") await cancelVersion(as(stage, "artist"), { version: versionId });
 }
 

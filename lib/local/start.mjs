@@ -50,8 +50,9 @@ async function serve(options, folders, shutdown) {
     console.log(`Stopped what a killed start had left running: ${leftovers.join(", ")}.`);
   const task = { cwd: root, pidsFile: folders.pids, signal: shutdown.signal };
   await ensureNpmPackages(task, join(folders.logs, "npm.log"));
-  const env = await prepareData(options, folders, shutdown, task);
+  // Before the data: the demonstration's frames show stars.
   await ensureSky(task, join(folders.logs, "sky.log"));
+  const env = await prepareData(options, folders, shutdown, task);
   await ensureWebBuild(task, ".next", join(folders.logs, "build.log"));
   /** @type {Refusal | undefined} */
   let failure;
