@@ -7,20 +7,27 @@ import { shots } from "@/db/schema/shots";
 import { renders, seals, versions } from "@/db/schema/versions";
 import { may, productionsWhere } from "../auth/authorize";
 import type { Ctx } from "../context";
+import { dateIn } from "../shots/today";
+import { minutesForVersion } from "../today/reading-time";
+import { sayWaiting } from "../today/waiting-words";
 
 /** The newest versions that were sent and on which no frame is returned nor all are signed, oldest first. */
 export async function listQueue(ctx: Ctx) {
   const rows = await findQueue(ctx.db, productionsWhere(ctx.actor, "review.see"));
+  const now = new Date();
+  const { timeZone } = ctx.actor;
   const items = rows.map(({ madeBy, sentAt, ...row }) => ({
     ...row,
-    sentAt: sentAt.toISOString(),
+    sentOn: dateIn(timeZone, sentAt),
+    /** "two days", "since Wednesday". */
+    waited: sayWaiting(sentAt, now, timeZone),
+    minutes: minutesForVersion(row.last - row.first + 1),
     /** Whether the verdict is the reader's to give. */
     yours: may(ctx.actor, "verdict.give", row.productionId) && madeBy !== ctx.actor.id,
   }));
-  const { name, timeZone } = ctx.actor;
   return {
     items,
-    reader: { name, timeZone },
+    today: dateIn(timeZone, now),
     judges: productionsWhere(ctx.actor, "verdict.give").length > 0,
   };
 }

@@ -16,12 +16,7 @@ export async function getToday(ctx: Ctx): Promise<Today> {
   const { timeZone } = ctx.actor;
   const seesLog = productionsWhere(ctx.actor, "log.see").length > 0;
   const [found, events] = await Promise.all([
-    Promise.all([
-      findForAdvisor(ctx, now),
-      findForArtist(ctx),
-      findForProducer(ctx, now),
-      findForClient(ctx),
-    ]),
+    Promise.all([findForAdvisor(ctx), findForArtist(ctx), findForProducer(ctx, now), findForClient(ctx)]),
     seesLog ? listEvents(ctx, { limit: shownEvents }) : [],
   ]);
   const today = dateIn(timeZone, now);

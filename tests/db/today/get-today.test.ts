@@ -82,7 +82,7 @@ describe("what waits, as one shot goes its way", () => {
     await withdrawVerdict(studio.as.advisor, { version, words: "The edge.", after });
     expect(await waiting("producer")).toEqual(["Delivery 1, First light, is stopped."]);
     const { items } = await getToday(studio.as.advisor);
-    expect(items[0]!.detail).toMatch(/its sign-off was withdrawn/);
+    expect(items[0]!.detail).toMatch(/Its sign-off was withdrawn/);
   });
 });
 

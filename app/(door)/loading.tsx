@@ -1,0 +1,5 @@
+import { Loading } from "@/components/empty/loading";
+
+export default function Load() {
+  return <Loading what="the delivery" />;
+}
