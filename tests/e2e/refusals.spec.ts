@@ -102,6 +102,24 @@ test("the wrong role is told so, and another production's thing is not there", a
   expect([own.status, own.body.error.message]).toEqual([403, expect.stringContaining("science advisor")]);
 });
 
+test("a page of what is not there, and one of what is not the reader's, are the same page and a 404", async ({
+  browser,
+}) => {
+  const facts = await factsOf(await enter(browser, "advisor"), "SM-020");
+  const client = await enter(browser, "client");
+  const nothing = "00000000-0000-4000-8000-000000000000";
+  for (const path of ["/versions/{}", "/versions/{}/verdict", "/shots/{}/bench", "/deliveries/{}"]) {
+    const words = [];
+    for (const id of [path.startsWith("/shots") ? facts.shot : facts.version, nothing]) {
+      const response = await client.goto(path.replace("{}", id));
+      expect([path, response!.status()]).toEqual([path, 404]);
+      words.push(await client.locator("main").innerText());
+    }
+    expect(words[0]).toBe(words[1]);
+    await expect(client.getByRole("banner")).toHaveCount(1);
+  }
+});
+
 test("every page and answer carries the security headers, and scripts run by nonce", async ({ page }) => {
   const response = await page.goto("/sign-in");
   const headers = response!.headers();

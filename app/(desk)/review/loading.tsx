@@ -1,5 +1,5 @@
 import { Loading } from "@/components/empty/loading";
 
 export default function Load() {
-  return <Loading what="the page" />;
+  return <Loading what="the versions in review" />;
 }
