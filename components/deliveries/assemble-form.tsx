@@ -75,7 +75,7 @@ export function AssembleForm({ signed }: { signed: SignedRuns }) {
               {
                 value: ".",
                 word: "A dot,",
-                meaning: isDome ? "as film names have it." : "as film names have it.",
+                meaning: "as film names have it.",
               },
               { value: "_", word: "An underscore,", meaning: "as dome names have it." },
             ]}
