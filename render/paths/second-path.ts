@@ -1,8 +1,7 @@
-// A second opinion on a light path, sharing no code with the tracer: Hamilton's equations in Cartesian outgoing
-// Kerr–Schild coordinates (Kerr 1963; Misner, Thorne & Wheeler 1973 box 33.2; PHYSICS §4), integrated by odex
-// (Hairer & Wanner's extrapolation code). Outgoing, because there a path traced back into the hole stays regular.
-// g^{μν} = η^{μν} − f l^μ l^ν, f = 2r³/(r⁴+a²z²), l_μ = (1, −n), n = ((rx−ay)/(r²+a²), (ry+ax)/(r²+a²), z/r),
-// so H = ½[|p|² − p_t² − f(p_t + n·p)²].
+// A second opinion on a light path, sharing no code with the tracer: Hamilton's equations in Cartesian Kerr–Schild
+// coordinates (Kerr 1963; Misner, Thorne & Wheeler 1973 box 33.2; PHYSICS §4), integrated by odex (Hairer & Wanner's
+// extrapolation code). With s = +1 for outgoing coordinates, −1 for ingoing: f = 2r³/(r⁴+a²z²),
+// n = s((rx−s·ay)/(r²+a²), (ry+s·ax)/(r²+a²), z/r), H = ½[|p|² − p_t² − f(p_t + n·p)²].
 import { Solver } from "odex";
 import type { PathStart } from "./light-path";
 
@@ -29,14 +28,21 @@ function radiusOf(a: number, x: number, y: number, z: number): number {
   return Math.sqrt(b > 0 ? 0.5 * (b + root) : (2 * a * a * z * z) / (root - b));
 }
 
-/** d(state)/ds into the past, ds = dσ/r with σ the affine parameter: Hamilton's equations. */
-function derivative(a: number, pt: number, state: State): State {
+/** What stays the same along a path: spin, p_t, and s, the sign of the photon's p_r where it is received. */
+interface Frame {
+  a: number;
+  pt: number;
+  s: 1 | -1;
+}
+
+/** d(state)/dw into the past, dw = dσ/r with σ the affine parameter: Hamilton's equations. */
+function derivative({ a, pt, s }: Frame, state: State): State {
   const [x = 0, y = 0, z = 0, , px = 0, py = 0, pz = 0] = state;
   const r = radiusOf(a, x, y, z);
   const rr = r * r + a * a;
   const quartic = r ** 4 + a * a * z * z;
   const f = (2 * r ** 3) / quartic;
-  const n = [(r * x - a * y) / rr, (r * y + a * x) / rr, z / r] as const;
+  const n = [(s * r * x - a * y) / rr, (s * r * y + a * x) / rr, (s * z) / r] as const;
   const flat = n[0] * px + n[1] * py;
   const w = pt + flat + n[2] * pz;
 
@@ -44,9 +50,9 @@ function derivative(a: number, pt: number, state: State): State {
   const stretch = r / (r * r + (a * a * z * z) / (r * r));
   const dr = [x * stretch, y * stretch, (z * rr * stretch) / (r * r)] as const;
   const fThroughR = f * (3 / r - (4 * r ** 3) / quartic);
-  const npThroughR = (x * px + y * py) / rr - (2 * r * flat) / rr - (z * pz) / (r * r);
+  const npThroughR = s * ((x * px + y * py) / rr - (z * pz) / (r * r)) - (2 * r * flat) / rr;
   const fExplicit = [0, 0, (-2 * a * a * z * f) / quartic] as const;
-  const npExplicit = [(r * px + a * py) / rr, (r * py - a * px) / rr, pz / r] as const;
+  const npExplicit = [(s * r * px + a * py) / rr, (s * r * py - a * px) / rr, (s * pz) / r] as const;
   const force = (i: 0 | 1 | 2) =>
     0.5 * w * w * (dr[i] * fThroughR + fExplicit[i]) + f * w * (dr[i] * npThroughR + npExplicit[i]);
 
@@ -62,48 +68,61 @@ function derivative(a: number, pt: number, state: State): State {
   ];
 }
 
-/** Boyer–Lindquist t and φ less their Kerr–Schild namesakes, at r: ∫2r/Δ dr and ∫a/Δ dr. */
-function offsets(a: number, r: number): { t: number; phi: number } {
+/** Boyer–Lindquist t and φ less their Kerr–Schild namesakes, at r: s∫2r/Δ dr and s∫a/Δ dr. */
+function offsets({ a, s }: Frame, r: number): { t: number; phi: number } {
   const half = Math.sqrt(1 - a * a);
   const [outer, inner] = [Math.log(r - 1 - half), Math.log(r - 1 + half)];
   return {
-    t: ((1 + half) * outer - (1 - half) * inner) / half,
-    phi: (a * (outer - inner)) / (2 * half),
+    t: (s * ((1 + half) * outer - (1 - half) * inner)) / half,
+    phi: (s * a * (outer - inner)) / (2 * half),
   };
 }
 
-/** The Kerr–Schild azimuth of a point: arg(x + iy) = φ − arctan(a/r). */
-function azimuthOf(a: number, [x = 0, y = 0, z = 0]: State): number {
-  return Math.atan2(y, x) + Math.atan2(a, radiusOf(a, x, y, z));
+/** The Kerr–Schild azimuth of a point: arg(x + iy) = φ − s·arctan(a/r). */
+function azimuthOf({ a, s }: Frame, [x = 0, y = 0, z = 0]: State): number {
+  return Math.atan2(y, x) + s * Math.atan2(a, radiusOf(a, x, y, z));
 }
 
-/** Initial state of a received photon at φ_KS = 0, t_KS = 0, and its p_t; null when no such photon exists. */
-function initialState(start: PathStart): { state: State; pt: number } | null {
+/**
+ * p_r in Kerr–Schild coordinates, s(√R − |E|⁻¹E(2r − aλ))/Δ per unit |E|, formed so that nothing cancels near the
+ * horizon: R − (2r−aλ)² = Δ[r²+a²+2r−2aλ−η−(λ−a)²].
+ */
+function radialMomentum({ a, pt, s }: Frame, r: number, lambda: number, eta: number, root: number): number {
+  const other = -pt * (2 * r - a * lambda);
+  const rr = r * r + a * a;
+  if (other <= 0) return (s * (root - other)) / (rr - 2 * r);
+  return (s * (rr + 2 * r - 2 * a * lambda - eta - (lambda - a) ** 2)) / (root + other);
+}
+
+/** Initial state of a received photon at φ_KS = 0, t_KS = 0; null when no such photon exists. */
+function initialState(start: PathStart): { state: State; frame: Frame } | null {
   const { spin: a, rObs: r, cosThetaObs: mu, lambda, eta } = start;
   const sin = Math.sqrt((1 - mu) * (1 + mu));
   const rr = r * r + a * a;
-  const delta = r * r - 2 * r + a * a;
+  const delta = rr - 2 * r;
   if (!(delta > 0 && r > 1)) return null;
-  const radial = (rr - a * lambda) ** 2 - delta * (eta + (lambda - a) ** 2);
-  const onAxis = sin === 0;
-  const polar = eta + mu * mu * (a * a - (onAxis ? 0 : (lambda / sin) ** 2));
-  if (!(radial >= 0) || !(polar > -1e-9)) return null;
+  const carter = eta + (lambda - a) ** 2;
+  const radial = (rr - a * lambda) ** 2 - delta * carter;
+  const polar = eta + mu * mu * (a * a - (sin === 0 ? 0 : (lambda / sin) ** 2));
+  const rounding = 1e-9 * (rr * rr + delta * Math.abs(carter));
+  if (!(radial >= -rounding) || !(polar >= -rounding)) return null;
 
   // E < 0 where the future-directed photon would otherwise have p^t < 0.
   const energy = rr * rr - a * a * delta * sin * sin - 2 * a * r * lambda < 0 ? -1 : 1;
-  const pphi = energy * lambda;
+  const frame: Frame = { a, pt: -energy, s: start.signPr };
+  const pr = radialMomentum(frame, r, lambda, eta, Math.sqrt(Math.max(0, radial)));
   const ptheta = start.signPtheta * Math.sqrt(Math.max(0, polar));
-  const pr = (start.signPr * Math.sqrt(radial) - energy * 2 * r + a * pphi) / delta;
 
-  // The rows of ∂(x, y, z)/∂(r, θ, φ) at φ = 0 give p_r, p_θ and, divided by sin θ, p_φ; α is r p_x − a p_y.
-  const twist = onAxis ? 0 : pphi / sin;
-  const left = pr - (sin * a * twist) / rr;
+  // The rows of ∂(x, y, z)/∂(r, θ, φ) at φ = 0 give p_r, p_θ and, divided by sin θ, p_φ; α is r p_x − a_s p_y.
+  const as = frame.s * a;
+  const twist = sin === 0 ? 0 : (energy * lambda) / sin;
+  const left = pr - (sin * as * twist) / rr;
   const determinant = -((r * sin) ** 2) / rr - mu * mu;
   const alpha = (-r * sin * left - mu * ptheta) / determinant;
   const pz = ((sin * r * ptheta) / rr - mu * left) / determinant;
-  const px = (r * alpha + a * twist) / rr;
-  const py = (r * twist - a * alpha) / rr;
-  return { state: [r * sin, -a * sin, r * mu, 0, px, py, pz], pt: -energy };
+  const px = (r * alpha + as * twist) / rr;
+  const py = (r * twist - as * alpha) / rr;
+  return { state: [r * sin, -as * sin, r * mu, 0, px, py, pz], frame };
 }
 
 function createSolver(): Solver {
@@ -116,11 +135,11 @@ function createSolver(): Solver {
 }
 
 /** The state where z = 0, from one shortly before it: z itself becomes the independent variable (Hénon 1982). */
-function stateAtEquator(a: number, pt: number, before: State): State {
+function stateAtEquator(frame: Frame, before: State): State {
   const solver = createSolver();
   solver.initialStepSize = Math.abs(before[2]!) / 4;
   const perZ = (z: number, state: State) => {
-    const rates = derivative(a, pt, [...state.slice(0, 2), z, ...state.slice(3)]);
+    const rates = derivative(frame, [...state.slice(0, 2), z, ...state.slice(3)]);
     return rates.map((rate) => rate / rates[2]!);
   };
   return solver.solve(perZ, before[2]!, before, 0).y;
@@ -137,15 +156,16 @@ export function traceSecondPath(start: PathStart): SecondPath {
   const initial = initialState(start);
   const path: SecondPath = { fate: "unresolved", crossings: [] };
   if (!initial) return path;
-  const { state: first, pt } = initial;
+  const { state: first, frame } = initial;
   const horizon = 1 + Math.sqrt(1 - a * a);
-  const begun = offsets(a, start.rObs);
-  const azimuth = (state: State, r: number) => foldAngle(azimuthOf(a, state) + offsets(a, r).phi - begun.phi);
+  const begun = offsets(frame, start.rObs);
+  const azimuth = (state: State, r: number) =>
+    foldAngle(azimuthOf(frame, state) + offsets(frame, r).phi - begun.phi);
 
   let before = first;
   const solver = createSolver();
   solver.solve(
-    (_, state) => derivative(a, pt, state),
+    (_, state) => derivative(frame, state),
     0,
     first,
     1e6,
@@ -154,9 +174,9 @@ export function traceSecondPath(start: PathStart): SecondPath {
       const [x = 0, y = 0, z = 0, , px = 0, py = 0, pz = 0] = state;
       const r = radiusOf(a, x, y, z);
       if (before[2]! * z < 0) {
-        const there = stateAtEquator(a, pt, before);
+        const there = stateAtEquator(frame, before);
         const rThere = Math.sqrt(there[0]! ** 2 + there[1]! ** 2 - a * a);
-        const dt = -(there[3]! + offsets(a, rThere).t - begun.t);
+        const dt = -(there[3]! + offsets(frame, rThere).t - begun.t);
         if (rThere > horizon) path.crossings.push({ r: rThere, dphiMod2pi: azimuth(there, rThere), dt });
       }
       before = state;

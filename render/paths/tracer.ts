@@ -39,7 +39,9 @@ function invariantDrift(work: PathWork, steps: number): number {
   const muSlope = series[at + terms + 1]!;
   const radial = uSlope * uSlope - radialPotential(motion.spin, motion.lambda, motion.eta, series[at]!);
   const polar = polarPotential(motion.spin, motion.lambda, motion.eta, series[at + terms]!);
-  return Math.max(Math.abs(radial), Math.abs(muSlope * muSlope - polar / (motion.scale * motion.scale)));
+  const square = motion.scale * motion.scale;
+  const radialScale = 1 + square * series[at]! * series[at]!;
+  return Math.max(Math.abs(radial) / radialScale, Math.abs(muSlope * muSlope - polar / square));
 }
 
 /** One crossing of the equatorial plane, in the words of the published check values. */
