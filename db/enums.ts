@@ -30,4 +30,3 @@ export const linkPurposes = ["invitation", "password reset"] as const;
 export type LinkPurpose = (typeof linkPurposes)[number];
 
 export const outboxKinds = ["mail", "job"] as const;
-export type OutboxKind = (typeof outboxKinds)[number];

@@ -7,7 +7,9 @@ const post = (body: string, headers: Record<string, string> = {}) =>
 
 describe("reading a request", () => {
   it("joins query, body and path, and lets the path win", async () => {
-    const input = await readInput(post('{"code":"SM-010","shot":"from the body"}'), { shot: "from the path" });
+    const input = await readInput(post('{"code":"SM-010","shot":"from the body"}'), {
+      shot: "from the path",
+    });
     expect(input).toEqual({ production: "p1", code: "SM-010", shot: "from the path" });
   });
 
@@ -20,7 +22,9 @@ describe("reading a request", () => {
   });
 
   it("refuses a body over a megabyte", async () => {
-    await expect(readInput(post(`{"x":"${"a".repeat(1_000_001)}"}`), {})).rejects.toMatchObject({ code: "too-large" });
+    await expect(readInput(post(`{"x":"${"a".repeat(1_000_001)}"}`), {})).rejects.toMatchObject({
+      code: "too-large",
+    });
   });
 
   it("refuses a change asked for by another site's page", () => {
@@ -41,6 +45,8 @@ describe("reading a request", () => {
   it("answers a refusal with its words and field", async () => {
     const response = errorResponse(new DomainError("invalid", "spin: too large", "spin"), "r");
     expect(response.status).toBe(400);
-    expect(await response.json()).toEqual({ error: { code: "invalid", message: "spin: too large", field: "spin" } });
+    expect(await response.json()).toEqual({
+      error: { code: "invalid", message: "spin: too large", field: "spin" },
+    });
   });
 });

@@ -86,7 +86,7 @@ describe("a job of frames", () => {
     const shop = openWorkshop(studio.db, { store });
     const job = await jobOf(id);
     await runFrameJob(shop, { ...job, last: 1001 });
-    const [{ sha256 }] = (await filesOf(id)) as [{ sha256: string }];
+    const { sha256 } = (await filesOf(id))[0]!;
     await writeFile(join(root, sha256.slice(0, 2), sha256.slice(2)), "damaged");
     await runFrameJob(shop, job);
     expect(await store.verify(sha256)).toBe(true);

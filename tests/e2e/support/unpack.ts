@@ -8,7 +8,8 @@ export function unpack(archive: string): string {
   const place = mkdtempSync(join(tmpdir(), "ringwright-delivery-"));
   execFileSync("unzip", ["-q", archive, "-d", place]);
   const inside = readdirSync(place);
-  if (inside.length !== 1) throw new Error(`The archive holds ${inside.join(", ")}; one folder was expected.`);
+  if (inside.length !== 1)
+    throw new Error(`The archive holds ${inside.join(", ")}; one folder was expected.`);
   return join(place, inside[0]!);
 }
 
