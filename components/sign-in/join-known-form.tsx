@@ -31,8 +31,8 @@ export function JoinKnownForm({ token, email, signedIn }: JoinKnownFormProps) {
         await requestJson("/api/invitations/acceptance", { method: "PUT", body });
         setJoined(true);
       }
-      if (signedIn) return router.push("/today");
-      const why = await admit({ email, password }, "/today");
+      if (signedIn) return router.push("/");
+      const why = await admit({ email, password }, "/");
       if (why) setError("root", { message: why });
     } catch (error) {
       showRefusal(error, setError, ["password"]);

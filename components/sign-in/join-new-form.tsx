@@ -32,7 +32,7 @@ export function JoinNewForm({ token, email, name }: JoinNewFormProps) {
   const submit = handleSubmit(async (input) => {
     try {
       await requestJson("/api/invitations/acceptance", { body: { token, ...input } });
-      const why = await admit({ email, password: input.password }, "/today");
+      const why = await admit({ email, password: input.password }, "/");
       if (why) setError("root", { message: `Your account is made, but you are not signed in. ${why}` });
     } catch (error) {
       showRefusal(error, setError, ["name", "password", "timeZone"]);

@@ -20,7 +20,7 @@ export function NewPasswordForm({ token, email }: { token: string; email: string
   const submit = handleSubmit(async ({ password }) => {
     try {
       await requestJson("/api/resets/password", { body: { token, password } });
-      const why = await admit({ email, password }, "/today");
+      const why = await admit({ email, password }, "/");
       if (why) setError("root", { message: `Your new password is set, but you are not signed in. ${why}` });
     } catch (error) {
       showRefusal(error, setError, ["password"]);

@@ -18,7 +18,7 @@ describe("the path after sign-in", () => {
     undefined,
     ["/studio"],
     "/sign-in?next=/sign-in",
-  ])("leads %j to Today instead", (wanted) => {
-    expect(localPath(wanted)).toBe("/today");
+  ])("leads %j to the start instead", (wanted) => {
+    expect(localPath(wanted)).toBe("/");
   });
 });
