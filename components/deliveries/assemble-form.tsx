@@ -26,7 +26,6 @@ export function AssembleForm({ signed }: { signed: SignedRuns }) {
   const { errors, isSubmitting } = formState;
   const chosen = useWatch({ control });
   const items = chosen.items ?? [];
-  const isDome = signed.production.kind === "dome";
   return (
     <form method="post" onSubmit={submit} noValidate className="mt-24">
       <div className="grid gap-x-72 gap-y-36 lg:grid-cols-[minmax(0,1fr)_360px]">

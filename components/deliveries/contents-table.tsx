@@ -19,6 +19,8 @@ export function ContentsTable({ sets, texts, actOf }: ContentsTableProps) {
   const listed = texts.filter(({ path }) => path === manifest);
   const sizeOf = (bytes: number) =>
     bytes < unit.size ? sayBytes(bytes) : `${figureIn(bytes, unit.size)} ${unit.name}`;
+  // The column of acts is left out on a phone, and the sizes end the row there.
+  const lastOnPhone = actOf ? "max-md:pr-0" : "";
   return (
     <Table>
       <caption className="sr-only">What is in the delivery</caption>
@@ -29,7 +31,7 @@ export function ContentsTable({ sets, texts, actOf }: ContentsTableProps) {
           <HeadCell>frames</HeadCell>
           <HeadCell className="text-right">files</HeadCell>
           <HeadCell className="hidden sm:table-cell">format</HeadCell>
-          <HeadCell className="text-right">size</HeadCell>
+          <HeadCell className={`text-right ${lastOnPhone}`}>size</HeadCell>
           {actOf && <HeadCell className="hidden md:table-cell">alone</HeadCell>}
         </tr>
       </thead>
@@ -43,7 +45,7 @@ export function ContentsTable({ sets, texts, actOf }: ContentsTableProps) {
             </Cell>
             <FigureCell>{set.files}</FigureCell>
             <Cell className="hidden text-soft sm:table-cell">{set.format}</Cell>
-            <FigureCell>{sizeOf(set.bytes)}</FigureCell>
+            <FigureCell className={lastOnPhone}>{sizeOf(set.bytes)}</FigureCell>
             {actOf && <Cell className="hidden md:table-cell">{actOf(set)}</Cell>}
           </Row>
         ))}
@@ -55,12 +57,14 @@ export function ContentsTable({ sets, texts, actOf }: ContentsTableProps) {
             <Cell colSpan={2} className="sm:hidden">
               {name}
             </Cell>
-            <Cell colSpan={3} className="hidden sm:table-cell">
+            <Cell colSpan={3} className="hidden pl-0 sm:table-cell">
               {name}
             </Cell>
             <FigureCell>{files.length}</FigureCell>
             <Cell className="hidden text-soft sm:table-cell">{format}</Cell>
-            <FigureCell>{sizeOf(files.reduce((sum, { bytes }) => sum + bytes, 0))}</FigureCell>
+            <FigureCell className={lastOnPhone}>
+              {sizeOf(files.reduce((sum, { bytes }) => sum + bytes, 0))}
+            </FigureCell>
             {actOf && <Cell className="hidden md:table-cell" />}
           </Row>
         ))}

@@ -119,7 +119,7 @@ function Lines({ lines, timeZone }: { lines: DeliveryLine[]; timeZone: string })
 function LineStanding({ line }: { line: DeliveryLine }) {
   if (line.standing === null) return <span className="text-soft">withdrawn</span>;
   return (
-    <span className="inline-flex flex-wrap items-center gap-x-6">
+    <span className="inline-flex flex-wrap items-center">
       <Standing standing={line.standing} />
       {line.publishedAt === null && line.standing === "signed off" && (
         <span className="text-soft">, not published</span>

@@ -58,6 +58,7 @@ export function PublishForm({ delivery, clients, isStopped }: PublishFormProps) 
         unit="days"
         inputMode="numeric"
         boxClassName="w-90"
+        className="max-w-240"
         error={errors.days?.message}
         {...register("days", { valueAsNumber: true })}
       />

@@ -18,3 +18,7 @@ export const capitalised = (words: string): string => words.charAt(0).toUpperCas
 /** "one thing", "three things". */
 export const countOf = (value: number, one: string, many: string): string =>
   `${numberWords(value)} ${value === 1 ? one : many}`;
+
+/** "Ilo", "Ilo and Corin", "Ilo, Ada and Corin". */
+export const listNames = (names: readonly string[]): string =>
+  names.length > 1 ? `${names.slice(0, -1).join(", ")} and ${names.at(-1)}` : (names[0] ?? "");

@@ -15,6 +15,7 @@ import { TextArea } from "../field/text-area";
 import { TextField } from "../field/text-field";
 import { Message } from "../message/message";
 import { StandingGlyph } from "../standing/standing-glyph";
+import { listNames } from "../today/number-words";
 import { FrameInput } from "./frame-input";
 import { Given } from "./given";
 
@@ -142,7 +143,5 @@ const FrameErrors = ({ messages }: { messages: (string | undefined)[] }) => (
 );
 
 function sayTold(names: readonly string[]): string {
-  if (names.length === 0) return "Nobody else is told.";
-  const list = names.length > 1 ? `${names.slice(0, -1).join(", ")} and ${names.at(-1)}` : names[0];
-  return `${list} will be told.`;
+  return names.length === 0 ? "Nobody else is told." : `${listNames(names)} will be told.`;
 }

@@ -4,6 +4,7 @@ import { useEffect, useRef } from "react";
 import { LinkButton } from "../button/link-button";
 import { TextLink } from "../button/text-action";
 import { Message } from "../message/message";
+import { listNames } from "../today/number-words";
 
 export interface GivenProps {
   statement: string;
@@ -23,7 +24,7 @@ export function Given({ statement, told, version }: GivenProps) {
         </h2>
         {told.length > 0 && (
           <p>
-            {told.join(", ")} {told.length === 1 ? "is" : "are"} told by letter.
+            {listNames(told)} {told.length === 1 ? "is" : "are"} told by letter.
           </p>
         )}
       </Message>

@@ -4,9 +4,9 @@ import { StandingGlyph } from "../standing/standing-glyph";
 
 const glyphs = { "signed off": "signed off", returned: "returned", withdrawn: "in review" } as const;
 const words = {
-  "signed off": "stands signed off",
-  returned: "stands returned",
-  withdrawn: "was signed off, and the sign-off withdrawn",
+  "signed off": "signed off",
+  returned: "returned",
+  withdrawn: "withdrawn after it was signed off",
 };
 
 /** What stands on which frames at present, in whose words. */
@@ -18,7 +18,7 @@ export function Standing({ runs, timeZone }: { runs: StandingRun[]; timeZone: st
           <li key={`${run.verdictId} ${run.first}`} className="flex gap-12 border-b border-hair py-8">
             <StandingGlyph standing={glyphs[run.kind]} className="mt-1" />
             <p className="type-label min-w-0 text-text">
-              {capital(frameWords(run.first, run.last))} {words[run.kind]}, by {run.givenBy} on{" "}
+              {capital(frameWords(run.first, run.last))}: {words[run.kind]} by {run.givenBy} on{" "}
               {dayOf(run.givenAt, timeZone)}.
               {run.words && <span className="type-note block text-soft">“{run.words}”</span>}
             </p>
