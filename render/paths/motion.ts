@@ -11,6 +11,9 @@ export const equatorWidth = 1e-15;
 /** A potential this far below zero, relative to its own terms, is rounding at a turning point. */
 const roundingBelowZero = 1e-9;
 
+/** A positive η below this keeps a path at its latitude for ever; as zero it cannot underflow in a quotient. */
+const smallestEta = 1e-200;
+
 /** U(u) = u'² per unit τ: 1 + (a²−λ²−η)u² + 2[η+(λ−a)²]u³ − a²ηu⁴. Dimensionless. */
 export function radialPotential(a: number, lambda: number, eta: number, u: number): number {
   const bending = eta + (lambda - a) * (lambda - a);
@@ -42,7 +45,8 @@ function rootOf(potential: number, largestTerm: number): number {
  * horizon, forbidden λ and η, or a number that is not finite).
  */
 export function setMotion(start: PathStart, work: PathWork): boolean {
-  const { spin: a, rObs, lambda, eta } = start;
+  const { spin: a, rObs, lambda } = start;
+  const eta = start.eta > 0 && start.eta < smallestEta ? 0 : start.eta;
   const { motion, series } = work;
   const { force } = motion;
   const mu0 = Math.abs(start.cosThetaObs) < equatorWidth ? 0 : start.cosThetaObs;

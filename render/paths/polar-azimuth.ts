@@ -24,7 +24,7 @@ export function addVortical(work: PathWork, at: number, from: number, to: number
   const start = polarState(series, at, from);
   const end = polarState(series, at, to);
   const middle = 0.5 * (samples[19]! + samples[20]!);
-  const nearAxis = a > 0 && 2 * a * a * middle * middle >= a * a - eta;
+  const nearAxis = a * a > 0 && 2 * a * a * middle * middle >= a * a - eta;
 
   if (nearAxis) {
     const before = Math.atan2(lambda * start.mu, scale * start.slope);

@@ -41,11 +41,17 @@ export function marginallyBound(a: number, sense: Sense): number {
   return 2 - s * a + 2 * Math.sqrt(1 - s * a);
 }
 
-/** Innermost stable circular orbit, in M (BPT eq. 2.21). Domain 0 ≤ a ≤ 1. */
+/**
+ * Innermost stable circular orbit, in M (BPT eq. 2.21). With c, d = ∛(1±a), 3 − Z₁ = (c−d)²(c+d) and
+ * c − d = 2a/(c²+cd+d²), so that no digits cancel at small spins. Domain 0 ≤ a ≤ 1.
+ */
 export function iscoRadius(a: number, sense: Sense): number {
-  const z1 = 1 + Math.cbrt(1 - a * a) * (Math.cbrt(1 + a) + Math.cbrt(1 - a));
+  const c = Math.cbrt(1 + a);
+  const d = Math.cbrt(1 - a);
+  const z1 = 1 + c * d * (c + d);
   const z2 = Math.sqrt(3 * a * a + z1 * z1);
-  return 3 + z2 - senseSign(sense) * Math.sqrt((3 - z1) * (3 + z1 + 2 * z2));
+  const apart = (2 * a) / (c * c + c * d + d * d);
+  return 3 + z2 - senseSign(sense) * apart * Math.sqrt((c + d) * (3 + z1 + 2 * z2));
 }
 
 /** Energy per rest mass on the innermost stable orbit, √(1 − 2/(3 r_isco)) (BPT §II). Domain 0 ≤ a ≤ 1. */
