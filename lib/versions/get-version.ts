@@ -11,11 +11,13 @@ import { frames, renders, seals, versions } from "@/db/schema/versions";
 import { kernelVersion } from "@/render/kernel-version";
 import type { Setup } from "@/render/scene/setup";
 import { may } from "../auth/authorize";
-import type { Ctx } from "../context";
+import type { Action } from "../auth/policy";
+import type { Actor, Ctx } from "../context";
 import { found } from "../errors";
 import { sentenceOf } from "../events/sentence";
+import { describeSetup } from "../reviews/describe-setup";
 import { runsOf } from "./frame-names";
-import { findVersion } from "./find-version";
+import { findVersion, type VersionRow } from "./find-version";
 import type { RenderFacts, versionIdInput, VersionPage } from "./schema";
 import { readStandings } from "./version-facts";
 
@@ -55,10 +57,21 @@ export async function getVersion(ctx: Ctx, input: z.infer<typeof versionIdInput>
     seal: seal && { digest: seal.digest, bytes: seal.bytes, sealedAt: seal.sealedAt.toISOString() },
     sent: sent && { at: sent.sentAt.toISOString(), by: sentBy?.name ?? "", words: sent.words },
     history,
-    may: {
-      cancel: may(ctx.actor, "version.cancel", productionId),
-      resume: may(ctx.actor, "version.resume", productionId) && version.kernel === kernelVersion,
-    },
+    setupFacts: describeSetup(JSON.parse(version.setup) as Setup),
+    viewer: viewerOf(ctx.actor, version),
+  };
+}
+
+function viewerOf(actor: Actor, { productionId, madeBy, kernel }: VersionRow): VersionPage["viewer"] {
+  const does = (action: Action) => may(actor, action, productionId);
+  return {
+    timeZone: actor.timeZone,
+    role: actor.roles.get(productionId) ?? null,
+    mayCancel: does("version.cancel"),
+    mayResume: does("version.resume") && kernel === kernelVersion,
+    maySend: does("review.send"),
+    mayGiveVerdict: does("verdict.give") && madeBy !== actor.id,
+    mayWithdraw: does("verdict.withdraw") && madeBy !== actor.id,
   };
 }
 

@@ -6,6 +6,7 @@ import {
   type ColourSpace,
   type Quality,
   type RenderState,
+  type Role,
 } from "@/db/enums";
 import { maximumFrames, type Setup } from "@/render/scene/setup";
 import type { Standing } from "../shots/schema";
@@ -125,5 +126,15 @@ export interface VersionPage {
   seal: { digest: string; bytes: number; sealedAt: string } | null;
   sent: { at: string; by: string; words: string } | null;
   history: { at: string; sentence: string }[];
-  may: { cancel: boolean; resume: boolean };
+  /** The setup in plain sentences. */
+  setupFacts: string[];
+  viewer: {
+    timeZone: string;
+    role: Role | null;
+    mayCancel: boolean;
+    mayResume: boolean;
+    maySend: boolean;
+    mayGiveVerdict: boolean;
+    mayWithdraw: boolean;
+  };
 }
