@@ -27,8 +27,9 @@ export function followPath(record: PathRecord, options: TraceOptions): void {
     if (!(Math.abs(series[next]!) < 1e9 && Math.abs(series[next + terms]!) < 1e9)) return;
 
     // Where this step ends: at the horizon, on the celestial sphere, or after its whole length.
-    const end = endOfStep(record, at, next, h);
-    if (side * series[next + terms]! < 0) {
+    const crosses = side * series[next + terms]! < 0;
+    const end = endOfStep(record, at, next, h, crosses);
+    if (crosses) {
       side = -side;
       const crossing = whereEquals(series, at + terms, 0, h);
       if (crossing < end && noteCrossing(record, step, crossing, options)) return;
@@ -67,8 +68,11 @@ function advance(series: Float64Array, at: number, next: number, h: number): voi
   series[next + terms + 1] = muSlope;
 }
 
-/** Notes a radial turning point, decides the fate if this step settles it, and says how far the step counts. */
-function endOfStep(record: PathRecord, at: number, next: number, h: number): number {
+/**
+ * Notes a radial turning point, decides the fate if this step settles it, and says how far the step counts. Where the
+ * horizon is only matters to a crossing in the same step.
+ */
+function endOfStep(record: PathRecord, at: number, next: number, h: number, crosses: boolean): number {
   const { motion, series } = record.work;
   const u1 = series[next]!;
   let reach = h;
@@ -85,7 +89,7 @@ function endOfStep(record: PathRecord, at: number, next: number, h: number): num
   }
   if (uReach >= motion.uHorizon) {
     record.fate = fates.captured;
-    return whereEquals(series, at, motion.uHorizon, reach);
+    return crosses ? whereEquals(series, at, motion.uHorizon, reach) : reach;
   }
   if (uReach <= 0) {
     record.fate = fates.escaped;
