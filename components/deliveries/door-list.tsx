@@ -12,9 +12,10 @@ export function DoorList({ doors, timeZone }: { doors: DoorLine[]; timeZone: str
         When the studio publishes a delivery to you, it stands here and a letter tells you so.
       </p>
     );
+  const first = doors.find(({ receipt, stopped }) => receipt === null && !stopped);
   return (
     <ul className="mt-24 border-t border-text">
-      {doors.map((door, index) => (
+      {doors.map((door) => (
         <li
           key={door.id}
           className="flex flex-wrap items-center gap-x-24 gap-y-12 border-b border-hair py-16"
@@ -27,7 +28,7 @@ export function DoorList({ doors, timeZone }: { doors: DoorLine[]; timeZone: str
             </p>
           </div>
           <DoorStanding door={door} />
-          <LinkButton href={`/deliveries/${door.id}`} look={index === 0 ? "primary" : "plain"}>
+          <LinkButton href={`/deliveries/${door.id}`} look={door === first ? "primary" : "plain"}>
             Open it
           </LinkButton>
         </li>

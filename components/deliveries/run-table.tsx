@@ -53,7 +53,7 @@ export function RunTable({ runs, chosen, onChange }: RunTableProps) {
             <Row key={keyOf(run)} chosen={isChosen}>
               <Cell>
                 <CheckBox
-                  label={<span className="type-figure">{run.shotCode}</span>}
+                  label={<span className="type-figure whitespace-nowrap">{run.shotCode}</span>}
                   checked={isChosen}
                   onChange={(event) => toggle(run, event.target.checked)}
                 />

@@ -85,7 +85,7 @@ export function writeReport(delivery: string, { matching, different, missing }: 
   const list = (title: string, paths: string[]) =>
     paths.length > 0 ? [`${title}:`, ...paths.map((path) => `  ${path}`)] : [];
   return [
-    `${delivery}: ${matching.length} files match what was signed, ${different.length} do not, ${missing.length} were not among the chosen files.`,
+    `${delivery}: as signed ${matching.length}, not as signed ${different.length}, not among the chosen files ${missing.length}.`,
     ...list("Not as signed", different),
     ...list("Not among the chosen files", missing),
     ...list("As signed", matching),

@@ -54,8 +54,10 @@ export function DeclarationForm({ facts }: { facts: DeclarationFacts }) {
           error={errors.last?.message}
           {...register("last", { valueAsNumber: true })}
         />{" "}
-        of version {facts.number} of {facts.shotCode}, made by {facts.maker}, and at no other bytes than those
-        of the digest opposite.
+        of version {facts.number} of <span className="whitespace-nowrap">{facts.shotCode}</span>, made by{" "}
+        {facts.maker}, and at no other bytes than those of the digest{" "}
+        <span className="max-lg:hidden">opposite</span>
+        <span className="lg:hidden">beneath</span>.
       </p>
       <FrameErrors messages={[errors.first?.message, errors.last?.message]} />
       <Choice

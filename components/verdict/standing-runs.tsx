@@ -6,7 +6,7 @@ const glyphs = { "signed off": "signed off", returned: "returned", withdrawn: "i
 const words = {
   "signed off": "signed off",
   returned: "returned",
-  withdrawn: "withdrawn after it was signed off",
+  withdrawn: "sign-off withdrawn",
 };
 
 /** What stands on which frames at present, in whose words. */

@@ -13,7 +13,7 @@ export function VerdictPage({ facts }: { facts: DeclarationFacts }) {
   return (
     <div className="mx-auto w-full max-w-1920 px-16 pt-36 pb-72 sm:px-48 xl:pl-120">
       <LivePage about={{ versionId: facts.id }} />
-      <div className="grid gap-x-96 gap-y-48 lg:grid-cols-[minmax(0,720px)_minmax(300px,456px)] lg:gap-x-48 xl:justify-between xl:gap-x-96">
+      <div className="grid gap-x-96 gap-y-48 lg:grid-cols-[minmax(0,720px)_360px] xl:grid-cols-[minmax(0,720px)_456px] lg:gap-x-48 xl:justify-between xl:gap-x-96">
         <div className="min-w-0">
           <p className="type-figure text-soft">
             <TextLink href={`/versions/${facts.id}`}>
