@@ -7,11 +7,11 @@ export const computed: readonly string[] = [
 
 export const chosen: readonly string[] = [
   "The hole's mass and spin, the camera's place, motion and lens, the disk's edges, sense and peak temperature, the direction of the sky and the exposure were chosen for the picture. They are listed for each shot below, and stand to the last figure in its setup.json.",
-  "A chosen peak temperature is not compared with what the infall of gas onto such a hole would give, and the stars' brightness may have been chosen too: this build does not measure how far a picture departs from physics, and states no departure it has not measured.",
+  "How bright the stars are beside the disk is a choice as well, and each is drawn as a small soft point. A chosen peak temperature is not compared with what the infall of gas onto such a hole would give: this build does not measure how far a picture departs from physics, and states no departure it has not measured.",
 ];
 
 export const omitted: readonly string[] = [
-  "The disk has no thickness, no gas inside its inner edge, no turbulence, no wind or jet, and does not dim, scatter or reflect light. Its light returning to it by the hole's bending is left out. Images beyond the third order, thinner than any before them, are left out.",
+  "The disk is flat, opaque and steady: it has no thickness, no gas inside its inner edge, no turbulence, wind or jet, and reflects no light, its own returning light included. Of its images the first three are drawn; the further ones, thinner than any before them, are left dark. Polarisation, dust on the way and the lens's own flare are left out.",
 ];
 
 export const cautions: readonly string[] = [
