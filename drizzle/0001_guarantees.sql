@@ -22,8 +22,10 @@ CREATE FUNCTION check_frame() RETURNS trigger LANGUAGE plpgsql AS $$
 DECLARE version versions%ROWTYPE;
 BEGIN
   SELECT * INTO version FROM versions WHERE id = NEW.version_id FOR SHARE;
-  IF TG_TABLE_NAME = 'frames' AND NEW.number NOT BETWEEN version.first AND version.last THEN
-    RAISE EXCEPTION 'frame % is outside %-%', NEW.number, version.first, version.last USING ERRCODE = 'check_violation';
+  IF TG_TABLE_NAME = 'frames' THEN
+    IF NEW.number NOT BETWEEN version.first AND version.last THEN
+      RAISE EXCEPTION 'frame % is outside %-%', NEW.number, version.first, version.last USING ERRCODE = 'check_violation';
+    END IF;
   END IF;
   IF EXISTS (SELECT 1 FROM seals WHERE version_id = NEW.version_id) THEN
     RAISE EXCEPTION 'version % is sealed: nothing can be added', NEW.version_id USING ERRCODE = 'restrict_violation';
@@ -85,8 +87,8 @@ BEGIN
     RAISE EXCEPTION 'frames %-% are not all in %-%', NEW.first, NEW.last, version.first, version.last USING ERRCODE = 'check_violation';
   END IF;
   IF NEW.kind = 'withdrawn' AND EXISTS (
-    SELECT 1 FROM generate_series(NEW.first, NEW.last) frame
-    LEFT JOIN standing_verdicts s ON s.version_id = NEW.version_id AND s.frame = frame
+    SELECT 1 FROM generate_series(NEW.first, NEW.last) wanted(frame)
+    LEFT JOIN standing_verdicts s ON s.version_id = NEW.version_id AND s.frame = wanted.frame
     WHERE s.kind IS DISTINCT FROM 'signed off') THEN
     RAISE EXCEPTION 'only frames that are signed off can be withdrawn' USING ERRCODE = 'check_violation';
   END IF;
@@ -126,8 +128,8 @@ CREATE TRIGGER only_by_verdict BEFORE INSERT OR UPDATE OR DELETE ON standing_ver
 -- 5. A delivery holds signed frames only, and is closed once published.
 CREATE FUNCTION check_delivery_item() RETURNS trigger LANGUAGE plpgsql AS $$
 BEGIN
-  IF EXISTS (SELECT 1 FROM generate_series(NEW.first, NEW.last) frame
-             LEFT JOIN standing_verdicts s ON s.version_id = NEW.version_id AND s.frame = frame
+  IF EXISTS (SELECT 1 FROM generate_series(NEW.first, NEW.last) wanted(frame)
+             LEFT JOIN standing_verdicts s ON s.version_id = NEW.version_id AND s.frame = wanted.frame
              WHERE s.verdict_id IS DISTINCT FROM NEW.verdict_id OR s.kind <> 'signed off') THEN
     RAISE EXCEPTION 'not all of frames %-% are signed off by this verdict', NEW.first, NEW.last USING ERRCODE = 'restrict_violation';
   END IF;
