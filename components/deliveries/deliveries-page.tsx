@@ -7,7 +7,7 @@ import { Standing } from "../standing/standing";
 import { dayOf } from "../studio/moments";
 import { RowLink } from "../table/row-link";
 import { Cell, FigureCell, HeadCell, Row, Table } from "../table/table";
-import { capitalised, countOf } from "../today/number-words";
+import { capitalised, countOf } from "../words/number-words";
 import { DoorList } from "./door-list";
 
 export interface DeliveriesPageProps {

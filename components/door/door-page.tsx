@@ -3,7 +3,7 @@ import { Figure } from "../figure/figure";
 import { LivePage } from "../live/live-page";
 import { Standing } from "../standing/standing";
 import { dayOf } from "../studio/moments";
-import { capitalised, countOf } from "../today/number-words";
+import { capitalised, countOf } from "../words/number-words";
 import { CheckArrived } from "./check-arrived";
 import { DoorPictures } from "./door-pictures";
 import { ReceiptForm } from "./receipt-form";

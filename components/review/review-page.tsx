@@ -2,7 +2,7 @@ import type { QueueItem, ReviewQueue } from "@/lib/reviews/schema-pages";
 import type { TodayItem } from "@/lib/today/schema";
 import { Empty } from "../empty/empty";
 import { LivePage } from "../live/live-page";
-import { capitalised, countOf } from "../today/number-words";
+import { capitalised, countOf } from "../words/number-words";
 import { sayMinutes } from "../today/headline";
 import { WaitingList } from "../today/waiting-list";
 

@@ -1,21 +1,8 @@
 // Dates as days, and days as words. The day's number is counted in UTC, as due dates are whole days.
+import { countOf } from "../words/number-words";
+
 const dayLength = 86_400_000;
 const months = ["Jan", "Feb", "Mar", "Apr", "May", "Jun", "Jul", "Aug", "Sep", "Oct", "Nov", "Dec"];
-const words = [
-  "no",
-  "one",
-  "two",
-  "three",
-  "four",
-  "five",
-  "six",
-  "seven",
-  "eight",
-  "nine",
-  "ten",
-  "eleven",
-  "twelve",
-];
 
 /** Days since 1970-01-01 of "2031-10-20" or of a time in ISO 8601. */
 export const dayOf = (date: string) => Date.parse(date) / dayLength;
@@ -36,7 +23,7 @@ export function sayDays(from: number, to: number): string {
 
 /** "three days late". */
 export function sayLate(days: number): string {
-  return `${words[days] ?? days} ${days === 1 ? "day" : "days"} late`;
+  return `${countOf(days, "day", "days")} late`;
 }
 
 /** Weeks between labels: as many as their words need. */

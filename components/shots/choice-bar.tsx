@@ -4,7 +4,7 @@ import { useRouter } from "next/navigation";
 import { useState, type ReactNode } from "react";
 import type { ShotChange, ShotLine, ShotList } from "@/lib/shots/schema";
 import { TextAction } from "../button/text-action";
-import { capitalise, countWords } from "../studio/words";
+import { capitalised, countOf } from "../words/number-words";
 import { ArtistDialog } from "./artist-dialog";
 import { changeShots } from "./change-shots";
 import { DueDialog } from "./due-dialog";
@@ -87,5 +87,5 @@ const it = (chosen: ShotLine[]) => (chosen.length === 1 ? "it" : "them");
 function sayChosen(chosen: ShotLine[]): string {
   const codes = chosen.map(({ code }) => code);
   const named = codes.length > 4 ? `${codes.slice(0, 3).join(", ")} and others` : codes.join(", ");
-  return `${capitalise(countWords(chosen.length, "shot", "shots"))} chosen, ${named}:`;
+  return `${capitalised(countOf(chosen.length, "shot", "shots"))} chosen, ${named}:`;
 }

@@ -1,13 +1,13 @@
 // Numbers as a reader would say them.
 import type { ShotList } from "@/lib/shots/schema";
-import { capitalise, countWords } from "../studio/words";
+import { capitalised, countOf } from "../words/number-words";
 
 /** "Eleven shots; three ask for work, one is late." */
 export function sayShots({ shots, asking, late }: ShotList["totals"]): string {
   if (shots === 0) return "No shots yet.";
-  const ask = asking === 0 ? "none asks for work" : countWords(asking, "asks for work", "ask for work");
-  const lateness = late === 0 ? "" : `, ${countWords(late, "is late", "are late")}`;
-  return `${capitalise(countWords(shots, "shot", "shots"))}; ${ask}${lateness}.`;
+  const ask = asking === 0 ? "none asks for work" : countOf(asking, "asks for work", "ask for work");
+  const lateness = late === 0 ? "" : `, ${countOf(late, "is late", "are late")}`;
+  return `${capitalised(countOf(shots, "shot", "shots"))}; ${ask}${lateness}.`;
 }
 
 /** A length of time to two or three figures: "12 s", "3.4 min", "50.9 h". */

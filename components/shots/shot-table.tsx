@@ -1,7 +1,7 @@
 import type { ShotGroup, ShotList } from "@/lib/shots/schema";
 import { DateRuler } from "../ruler/date-ruler";
 import { HeadCell, Table } from "../table/table";
-import { countWords } from "../studio/words";
+import { countOf } from "../words/number-words";
 import { TodayLine, type Dates } from "./shot-facts";
 import { ShotRow } from "./shot-row";
 
@@ -87,7 +87,7 @@ function Group({ group, dates, chosen, onChoose }: Omit<ShotsShown, "list"> & { 
 
 /** "sequence 1, five shots", and how many of them are shown when a filter hides some. */
 export function sayGroup({ number, shotCount, shots }: ShotGroup): string {
-  const count = countWords(shotCount, "shot", "shots");
+  const count = countOf(shotCount, "shot", "shots");
   const hidden = shots.length < shotCount ? `, ${shots.length === 0 ? "none" : shots.length} shown` : "";
   return `sequence ${number}, ${count}${hidden}`;
 }

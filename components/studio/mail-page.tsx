@@ -5,7 +5,7 @@ import { Empty } from "../empty/empty";
 import { momentOf } from "./moments";
 import { StudioPage, type StudioPlace } from "./studio-page";
 import { splitLinks } from "./split-links";
-import { capitalise, countWords } from "./words";
+import { capitalised, countOf } from "../words/number-words";
 
 export interface Letter {
   id: string;
@@ -47,7 +47,7 @@ export function MailPage({ letters, total, open, timeZone, places }: MailPagePro
 }
 
 function titleOf(shown: number, total: number): string {
-  const all = capitalise(`${countWords(total, "letter", "letters")}, kept on this machine.`);
+  const all = capitalised(`${countOf(total, "letter", "letters")}, kept on this machine.`);
   return shown < total ? `${all} The newest ${shown}:` : all;
 }
 

@@ -4,7 +4,7 @@ import { NewProductionForm } from "./new-production-form";
 import type { Account, ProductionPeople } from "./people-schema";
 import { ProductionSection } from "./production-section";
 import { StudioPage, type StudioPlace } from "./studio-page";
-import { capitalise, countWords } from "./words";
+import { capitalised, countOf } from "../words/number-words";
 import { Empty } from "../empty/empty";
 
 export interface PeoplePageProps {
@@ -48,8 +48,8 @@ export function PeoplePage(props: PeoplePageProps) {
 function titleOf(productions: ProductionPeople[]): string {
   const people = new Set(productions.flatMap(({ members }) => members.map(({ personId }) => personId))).size;
   const invitations = productions.reduce((sum, { invitations }) => sum + invitations.length, 0);
-  const who = countWords(people, "person", "people");
-  const where = countWords(productions.length, "production", "productions");
-  const wait = invitations === 0 ? "" : `, ${countWords(invitations, "invitation", "invitations")} out`;
-  return capitalise(`${who} in ${where}${wait}.`);
+  const who = countOf(people, "person", "people");
+  const where = countOf(productions.length, "production", "productions");
+  const wait = invitations === 0 ? "" : `, ${countOf(invitations, "invitation", "invitations")} out`;
+  return capitalised(`${who} in ${where}${wait}.`);
 }

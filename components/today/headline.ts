@@ -1,5 +1,5 @@
 import type { TodayItem } from "@/lib/today/schema";
-import { capitalised, countOf, numberWords } from "./number-words";
+import { capitalised, countOf, numberWords } from "../words/number-words";
 
 /** "Three things wait for you, about fifty minutes." The time is left out when something in it cannot be reckoned. */
 export function sayHeadline(items: readonly Pick<TodayItem, "minutes">[]): string {

@@ -15,7 +15,7 @@ import { TextArea } from "../field/text-area";
 import { TextField } from "../field/text-field";
 import { Message } from "../message/message";
 import { StandingGlyph } from "../standing/standing-glyph";
-import { listNames } from "../today/number-words";
+import { listNames } from "../words/number-words";
 import { FrameInput } from "./frame-input";
 import { Given } from "./given";
 

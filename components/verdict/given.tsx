@@ -4,7 +4,7 @@ import { useEffect, useRef } from "react";
 import { LinkButton } from "../button/link-button";
 import { TextLink } from "../button/text-action";
 import { Message } from "../message/message";
-import { listNames } from "../today/number-words";
+import { listNames } from "../words/number-words";
 
 export interface GivenProps {
   statement: string;

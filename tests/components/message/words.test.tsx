@@ -3,7 +3,6 @@ import { expect, it } from "vitest";
 import { Empty } from "@/components/empty/empty";
 import { Digest, groupDigest } from "@/components/figure/digest";
 import { Message } from "@/components/message/message";
-import { ProgressLine } from "@/components/progress/progress-line";
 
 it("reads a message aloud: at once when it asks for something, in its turn otherwise", () => {
   render(
@@ -24,15 +23,6 @@ it("gives an empty place a heading of the level its page needs", () => {
     </Empty>,
   );
   expect(screen.getByRole("heading", { level: 3, name: "Nothing waits for you." })).toBeInTheDocument();
-});
-
-it("says how far work has come, and copes with work of unknown size", () => {
-  const { rerender } = render(<ProgressLine label="Tracing light paths" value={336} max={540} />);
-  const bar = screen.getByRole("progressbar", { name: "Tracing light paths" });
-  expect(bar).toHaveAttribute("aria-valuenow", "336");
-  expect(bar.querySelector<HTMLElement>("[style]")!.style.width).toBe("62.22%");
-  rerender(<ProgressLine label="Tracing light paths" value={0} max={0} />);
-  expect(bar.querySelector<HTMLElement>("[style]")!.style.width).toBe("0%");
 });
 
 const digest = "7c1e90ab44d2f3180b6a71ce5f90d2a4c83e17b92ad46f0591fb38c7e09b5a71";

@@ -19,7 +19,7 @@ describe("a day", () => {
     expect(sayDays(dayOf("2031-10-21"), dayOf("2031-10-22"))).toBe("21–22 Oct");
     expect(sayDays(dayOf("2031-10-30"), dayOf("2031-11-02"))).toBe("30 Oct–2 Nov");
     expect(sayDays(dayOf("2031-10-21"), dayOf("2031-10-21T18:00:00Z"))).toBe("21 Oct");
-    expect([1, 3, 40].map(sayLate)).toEqual(["one day late", "three days late", "40 days late"]);
+    expect([1, 3, 40].map(sayLate)).toEqual(["one day late", "three days late", "forty days late"]);
   });
 });
 

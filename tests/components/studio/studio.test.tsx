@@ -3,7 +3,6 @@ import { describe, expect, it } from "vitest";
 import { LogPage, type LogPageProps } from "@/components/studio/log-page";
 import { momentOf } from "@/components/studio/moments";
 import { splitLinks } from "@/components/studio/split-links";
-import { capitalise, countWords } from "@/components/studio/words";
 
 const log: LogPageProps = {
   chain: "11111111-1111-4111-8111-111111111111",
@@ -49,16 +48,6 @@ describe("the log's page", () => {
 });
 
 describe("words of the studio", () => {
-  it("count in words to twelve and in figures beyond", () => {
-    expect([0, 1, 12, 13].map((count) => countWords(count, "letter", "letters"))).toEqual([
-      "no letters",
-      "one letter",
-      "twelve letters",
-      "13 letters",
-    ]);
-    expect(capitalise("no letters.")).toBe("No letters.");
-  });
-
   it("tell the time where the reader is", () => {
     expect(momentOf("2031-01-01T00:30:00Z", "America/New_York")).toBe("31 Dec 2030, 19:30:00");
   });

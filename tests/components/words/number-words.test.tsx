@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { sayHeadline, sayMinutes } from "@/components/today/headline";
-import { countOf, listNames, numberWords } from "@/components/today/number-words";
+import { countOf, listNames, numberWords } from "@/components/words/number-words";
 
 describe("numbers as a sentence says them", () => {
   it.each([
