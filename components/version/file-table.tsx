@@ -76,8 +76,9 @@ function FileRow({ versionId, file }: { versionId: string; file: FileLine }) {
       </Cell>
       <FigureCell className="type-figure-small">{sayBytes(bytes)}</FigureCell>
       <Cell className="type-figure-small text-soft" title={sha256}>
-        <span className="2xl:hidden">
-          {sha256.slice(0, 8)} {sha256.slice(8, 16)} … {sha256.slice(-8)}
+        <span className="whitespace-nowrap 2xl:hidden">
+          {sha256.slice(0, 8)} <span className="hidden sm:inline">{sha256.slice(8, 16)} </span>…{" "}
+          {sha256.slice(-8)}
         </span>
         <span className="hidden 2xl:inline">{sha256}</span>
       </Cell>

@@ -35,9 +35,9 @@ export function RenderState({ version }: { version: VersionPage }) {
           )}
         </div>
         <ProgressRuler
-          label="frames rendered"
-          value={done + shareOf(under)}
-          max={of}
+          label="frames rendered, per cent"
+          value={(100 * (done + shareOf(under))) / of}
+          max={100}
           spoken={said}
           tone="text"
         />

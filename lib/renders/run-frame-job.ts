@@ -57,12 +57,15 @@ async function renderOne(shop: Workshop, plan: FramePlan, frame: number, signal:
   const request = { frame, quality, colourSpace, setupDigest, kernelVersion, signal, onProgress };
   const rendered = await shop.renderFrame(setup, request).catch((error: unknown) => {
     if (signal.aborted) throw error;
-    throw new FrameFailure(
-      `The renderer stopped: ${error instanceof Error ? error.message : String(error)}`,
-      error,
-    );
+    throw new FrameFailure(asSentence(error), error);
   });
   await keepFrame(shop.db, shop.store, plan, frame, rendered);
+}
+
+/** The renderer's own words, as the sentence that people are shown. */
+function asSentence(error: unknown): string {
+  const words = error instanceof Error ? error.message : String(error);
+  return /[.!?]$/.test(words) ? words : `${words}.`;
 }
 
 function readSetup(plan: FramePlan): Setup {

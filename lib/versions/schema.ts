@@ -62,6 +62,8 @@ export const colourSpaceWords: Record<(typeof colourSpaces)[number], string> = {
   acescg: "ACEScg",
 };
 
+export type { ColourSpace, Quality };
+
 export interface VersionLine {
   id: string;
   number: number;

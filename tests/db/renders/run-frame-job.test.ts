@@ -104,7 +104,7 @@ describe("a job of frames", () => {
     expect(await renderOf(id)).toMatchObject({
       state: "failed",
       failedFrame: 1002,
-      failure: "The renderer stopped: Pixel 7, 9 has no end.",
+      failure: "Pixel 7, 9 has no end.",
     });
     expect(await filesOf(id)).toHaveLength(2);
     const [event] = await eventsOf(id, "version.failed");

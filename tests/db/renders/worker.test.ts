@@ -29,21 +29,21 @@ const countFrames = (id: string) => studio.db.$count(frames, eq(frames.versionId
 const stateOf = async (id: string) =>
   (await studio.db.select().from(renders).where(eq(renders.versionId, id)))[0]!.state;
 
-/** Three frames that take long enough to be interrupted. */
+/** Five frames, two jobs, that take long enough to be interrupted. */
 async function begin(code: string) {
   const setup = {
     ...smallSetup,
-    time: { ...smallSetup.time, last: 1003 },
+    time: { ...smallSetup.time, last: 1005 },
     picture: { ...smallSetup.picture, width: 240, height: 135 },
   };
   const { production, sequence, ids, as } = studio;
   const shot = await addShot(as.producer, { production, sequence, artist: ids.artist }, code, setup);
-  const { id } = await beginVersion(as.artist, shot, { last: 1003 });
+  const { id } = await beginVersion(as.artist, shot, { last: 1005 });
   return { id, setup };
 }
 
 async function expectWhole(id: string): Promise<void> {
-  expect(await countFrames(id)).toBe(3);
+  expect(await countFrames(id)).toBe(5);
   expect(await studio.db.$count(seals, eq(seals.versionId, id))).toBe(1);
   expect(await studio.db.$count(outbox, like(outbox.key, `mail version.complete ${id}`))).toBe(1);
   const complete = await studio.db.select().from(events).where(eq(events.kind, "version.complete"));
@@ -70,7 +70,7 @@ describe("the worker process", () => {
       .where(eq(frameFiles.versionId, id))
       .orderBy(asc(frameFiles.frame), asc(frameFiles.kind));
     const { setupDigest, quality, colourSpace } = version!;
-    for (const frame of [1001, 1002, 1003]) {
+    for (const frame of [1001, 1002, 1003, 1004, 1005]) {
       const request = { frame, quality, colourSpace, setupDigest, kernelVersion };
       const { exr, png } = await renderFrame(setup, request);
       const expected = [exr, png].map((bytes) => createHash("sha256").update(bytes).digest("hex"));
