@@ -56,7 +56,8 @@ function ChoiceForm({ setup, choice, onChoose }: ChoiceDialogProps) {
   const { first: from, last: to } = setup.time;
   const [quality, setQuality] = useState(choice.quality);
   const [colourSpace, setColourSpace] = useState(choice.colourSpace);
-  const [run, setRun] = useState(chosenFrames(choice, setup));
+  const given = chosenFrames(choice, setup);
+  const [run, setRun] = useState(given);
   const faults = {
     first: faultOf(run.first, from, Math.min(to, run.last || to)),
     last: faultOf(run.last, Math.max(from, run.first || from), to),
@@ -86,7 +87,7 @@ function ChoiceForm({ setup, choice, onChoose }: ChoiceDialogProps) {
             key={end}
             label={`${end} frame`}
             inputMode="numeric"
-            defaultValue={run[end]}
+            defaultValue={given[end]}
             onChange={(event) => setRun({ ...run, [end]: readNumber(event.target.value) })}
             error={faults[end]}
             consequence={end === "first" ? `the setup begins at ${from}` : `the setup ends at ${to}`}

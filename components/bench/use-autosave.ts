@@ -1,8 +1,9 @@
-import { useEffect, useRef, useState } from "react";
 import type { BenchPage } from "@/lib/setups/schema";
 import type { Setup } from "@/render/scene/setup";
 import { requestJson } from "../api/request";
-import { saveSetup, setupPath, type SaveState } from "./save-setup";
+import { setupPath, type SaveState } from "./save-setup";
+import { useDelayed } from "./use-delayed";
+import { useSaver } from "./use-saver";
 
 export interface Autosave {
   state: SaveState;
@@ -17,57 +18,27 @@ export interface Autosave {
 const pauseMs = 700;
 const afterFailureMs = 10_000;
 
-const same = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b);
-
-/** Saves the values a moment after the last change, on the revision they were made on, one save at a time. */
+/** Saves the values a moment after the last change, on the revision they were made on. */
 export function useAutosave(page: BenchPage, values: Setup): Autosave {
-  const [state, setState] = useState<SaveState>({ kind: "saved", at: page.savedAt, by: page.savedBy });
-  const [saved, setSaved] = useState({ revision: page.revision, setup: page.setup });
-  const changed = !same(values, saved.setup);
-
-  const save = async (revision: number): Promise<number | undefined> => {
-    setState({ kind: "saving" });
-    const outcome = await saveSetup(page.shot.id, revision, values);
-    if (outcome.saved) setSaved(outcome.saved);
-    setState(outcome.state);
-    return outcome.saved?.revision;
-  };
+  const { state, changed, save, settled, adopt } = useSaver(page, values);
   const idle = state.kind !== "saving" && state.kind !== "conflict";
-  useDelayed(() => void save(saved.revision), {
+  useDelayed(() => void save(), {
     when: page.may.save && changed && idle,
     after: state.kind === "failed" ? afterFailureMs : pauseMs,
     restart: values,
   });
-
-  const fetchTheirs = async () => {
+  const takeTheirs = async () => {
     const theirs = await requestJson<BenchPage>(setupPath(page.shot.id));
-    setSaved({ revision: theirs.revision, setup: theirs.setup });
-    return theirs;
+    adopt(theirs);
+    return theirs.setup;
   };
   return {
     state: changed && state.kind === "saved" ? { kind: "waiting" } : state,
-    flush: async () => (changed ? save(saved.revision) : saved.revision),
-    saveOver: async () => void (await save((await fetchTheirs()).revision)),
-    takeTheirs: async () => {
-      const theirs = await fetchTheirs();
-      setState({ kind: "saved", at: theirs.savedAt, by: theirs.savedBy });
-      return theirs.setup;
+    flush: () => (changed ? save() : settled()),
+    takeTheirs,
+    saveOver: async () => {
+      await takeTheirs();
+      await save();
     },
   };
-}
-
-/** Does something once a condition has held for a while since `restart` last changed. */
-function useDelayed(
-  act: () => void,
-  { when, after, restart }: { when: boolean; after: number; restart: unknown },
-) {
-  const latest = useRef(act);
-  useEffect(() => {
-    latest.current = act;
-  });
-  useEffect(() => {
-    if (!when) return;
-    const timer = setTimeout(() => latest.current(), after);
-    return () => clearTimeout(timer);
-  }, [when, after, restart]);
 }
