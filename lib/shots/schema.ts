@@ -89,7 +89,6 @@ export const listShotsInput = z.object({
   holder: z.union([personId, z.literal("nobody"), z.literal("queue")]).optional(),
   order: z.enum(shotOrders).default("sequence"),
 });
-export type ListShotsInput = z.input<typeof listShotsInput>;
 
 export const shotIdInput = z.object({ shot: z.uuid("This is not the id of a shot.") });
 
