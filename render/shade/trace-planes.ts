@@ -82,6 +82,7 @@ function notePath(
     planes.sky[3 * i + 1] = sinTheta * Math.sin(phi);
     planes.sky[3 * i + 2] = record.cosThetaInf;
   } else {
+    // A fourth or later image of the disk, thinner than exp(−3π) of the first, is left black with the hole.
     planes.fate[i] = record.fate === fates.unresolved ? sampleFates.unresolved : sampleFates.captured;
   }
 }
