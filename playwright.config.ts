@@ -25,6 +25,7 @@ export default defineConfig({
     baseURL: process.env.E2E_BASE_URL,
     browserName: "chromium",
     trace: "off",
+    actionTimeout: 20_000,
     launchOptions: { executablePath: "/usr/bin/chromium", args: chromiumArguments },
   },
 });

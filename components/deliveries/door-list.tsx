@@ -29,7 +29,7 @@ export function DoorList({ doors, timeZone }: { doors: DoorLine[]; timeZone: str
           </div>
           <DoorStanding door={door} />
           <LinkButton href={`/deliveries/${door.id}`} look={door === first ? "primary" : "plain"}>
-            Open it
+            Open it<span className="sr-only">: {door.title}</span>
           </LinkButton>
         </li>
       ))}
