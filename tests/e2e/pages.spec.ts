@@ -10,7 +10,7 @@ const sizes = [
 
 /** What each person has open in a day's work; {…} is filled from the demonstration. */
 const screens: [Part, string[]][] = [
-  ["artist", ["/today", "/shots", "/shots/{SM-080}/bench", "/versions/{SM-070}", "/review"]],
+  ["artist", ["/today", "/shots", "/shots/{shot SM-080}/bench", "/versions/{SM-070}", "/review"]],
   ["advisor", ["/today", "/review", "/versions/{SM-020}", "/versions/{SM-020}/verdict"]],
   [
     "producer",
@@ -30,7 +30,11 @@ const screens: [Part, string[]][] = [
 async function readPlaces(page: Page): Promise<Record<string, string>> {
   const { production, groups } = (await ask(page, "GET", "/api/shots")).body;
   const places: Record<string, string> = { production: production.id };
-  for (const { shots } of groups) for (const { code, id, version } of shots) places[code] = version?.id ?? id;
+  for (const { shots } of groups)
+    for (const { code, id, version } of shots) {
+      places[`shot ${code}`] = id;
+      if (version) places[code] = version.id;
+    }
   await page.goto("/deliveries");
   const href = await page
     .getByRole("link", { name: /SM-050/ })
@@ -61,14 +65,15 @@ for (const [part, patterns] of screens)
       expect(weight).toBeGreaterThan(0);
       for (const size of sizes) {
         await page.setViewportSize(size);
-        const beyond = await page.evaluate(
-          () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
-        );
-        expect([size.width, beyond]).toEqual([size.width, 0]);
+        // Rulers take the new width with the next frame.
+        await expect.poll(() => beyondTheEdge(page), { message: `sideways at ${size.width}` }).toBe(0);
         expect(await violations(page)).toEqual([]);
       }
+      const room = await page.locator("[data-room]").first().getAttribute("data-room");
+      const other = room === "desk" ? "viewing" : "desk";
       await page.getByRole("button", { name: /^Read/ }).click();
-      await expect(page.locator("[data-room]").first()).toBeVisible();
+      await expect(page.locator(`[data-room="${other}"]`).first()).toBeVisible();
+      await expect(page).toHaveTitle(/Ringwright/);
       expect(await violations(page)).toEqual([]);
       expect(faults).toEqual([]);
     });
@@ -85,10 +90,13 @@ test("no page asks any other host for anything", async ({ browser }) => {
   const page = await enter(browser, "artist");
   const hosts = new Set<string>();
   page.on("request", (request) => hosts.add(new URL(request.url()).host));
-  for (const path of ["/today", "/shots", pathOf("/versions/{SM-070}"), pathOf("/shots/{SM-080}/bench")])
+  for (const path of ["/today", "/shots", pathOf("/versions/{SM-070}"), pathOf("/shots/{shot SM-080}/bench")])
     await page.goto(path);
   expect([...hosts]).toEqual([new URL(page.url()).host]);
 });
+
+const beyondTheEdge = (page: Page): Promise<number> =>
+  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
 
 async function violations(page: Page): Promise<string[]> {
   const { violations: found } = await new AxeBuilder({ page }).analyze();

@@ -1,5 +1,0 @@
-import { Loading } from "@/components/empty/loading";
-
-export default function Load() {
-  return <Loading what="the delivery" />;
-}
