@@ -10,6 +10,8 @@ const node = (name: string, extra: object = {}) => ({
     environment: "node" as const,
     include: [`tests/${name}/**/*.test.ts`],
     testTimeout: 60_000,
+    // What tests provoke on purpose would drown what they find.
+    env: { LOG_LEVEL: "silent" },
     ...extra,
   },
 });

@@ -116,7 +116,7 @@ test("a page of what is not there, and one of what is not the reader's, are the 
       words.push(await client.locator("main").innerText());
     }
     expect(words[0]).toBe(words[1]);
-    await expect(client.getByRole("banner")).toHaveCount(1);
+    await expect(client.getByRole("main")).toHaveCount(1);
   }
 });
 
