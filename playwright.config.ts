@@ -19,6 +19,8 @@ export default defineConfig({
   workers: 1,
   retries: 0,
   timeout: 180_000,
+  // The worker may have both cores while a page is asked for.
+  expect: { timeout: 20_000 },
   forbidOnly: true,
   reporter: [["line"], ["json", { outputFile: process.env.E2E_REPORT ?? ".data/test/playwright.json" }]],
   use: {
