@@ -1,6 +1,6 @@
 "use client";
 
-import type { Standing } from "@/lib/shots/schema";
+import type { Standing } from "@/lib/shots/schema-standing";
 import { LinkButton } from "../button/link-button";
 import { SendDialog } from "./send-dialog";
 import { WithdrawDialog } from "./withdraw-dialog";

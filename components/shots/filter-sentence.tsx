@@ -2,7 +2,8 @@
 
 import { parseAsString, parseAsStringLiteral, useQueryStates } from "nuqs";
 import { useTransition } from "react";
-import { shotOrders, standings, type ShotList } from "@/lib/shots/schema";
+import type { ShotList } from "@/lib/shots/schema";
+import { shotOrders, standings } from "@/lib/shots/schema-standing";
 import { Figure } from "../figure/figure";
 import { sayDuration } from "./say";
 import { WordChoice } from "./word-choice";

@@ -1,5 +1,5 @@
 // The standing rings of LOOK, "Glyphs": a 24-unit box, centre 12,12; angles anticlockwise from 3 o'clock.
-import type { Standing } from "@/lib/shots/schema";
+import type { Standing } from "@/lib/shots/schema-standing";
 
 export interface Stroke {
   d: string;

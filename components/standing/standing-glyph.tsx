@@ -1,4 +1,4 @@
-import type { Standing } from "@/lib/shots/schema";
+import type { Standing } from "@/lib/shots/schema-standing";
 import { drawStanding, standingTones, type Tone } from "./geometry";
 
 export const toneText: Record<Tone, string> = {

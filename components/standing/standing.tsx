@@ -1,4 +1,4 @@
-import type { Standing as StandingName } from "@/lib/shots/schema";
+import type { Standing as StandingName } from "@/lib/shots/schema-standing";
 import { standingTones } from "./geometry";
 import { StandingGlyph, toneText } from "./standing-glyph";
 

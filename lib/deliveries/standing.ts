@@ -1,4 +1,4 @@
-import type { Standing } from "../shots/schema";
+import type { Standing } from "../shots/schema-standing";
 import type { ReceiptKind } from "@/db/enums";
 
 export interface DeliveryFacts {

@@ -1,4 +1,5 @@
-import { standings, type ShotLine, type ShotOrder, type Standing } from "./schema";
+import { type ShotLine } from "./schema";
+import { standings, type ShotOrder, type Standing } from "./schema-standing";
 
 const asking = new Set<Standing>(["ready", "in review", "returned"]);
 const settled = new Set<Standing>(["delivered", "received", "on hold", "omitted"]);

@@ -3,7 +3,8 @@ import type { Database } from "@/db/client";
 import { deliveries, deliveryItems, recipients } from "@/db/schema/deliveries";
 import { memberships, people } from "@/db/schema/people";
 import type { Role } from "@/db/enums";
-import type { Holder, Standing } from "./schema";
+import type { Holder } from "./schema";
+import type { Standing } from "./schema-standing";
 
 interface Person {
   id: string;

@@ -1,21 +1,6 @@
 import { z } from "zod";
 import { holds } from "@/db/enums";
-
-export const standings = [
-  "open",
-  "rendering",
-  "stopped",
-  "ready",
-  "in review",
-  "returned",
-  "signed off",
-  "delivered",
-  "received",
-  "refused",
-  "on hold",
-  "omitted",
-] as const;
-export type Standing = (typeof standings)[number];
+import { shotOrders, standings, type Standing } from "./schema-standing";
 
 const productionId = z.uuid("This is not the id of a production.");
 const personId = z.uuid("This is not the id of a person.");
@@ -77,9 +62,6 @@ export const changeShotsInput = z.object({
     .max(500, "At most 500 shots at once."),
   change: shotChangeSchema,
 });
-
-export const shotOrders = ["sequence", "due date", "standing", "machine time"] as const;
-export type ShotOrder = (typeof shotOrders)[number];
 
 export const listShotsInput = z.object({
   /** Left out: the first production the reader belongs to. */

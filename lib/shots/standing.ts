@@ -1,5 +1,5 @@
 import type { Hold, RenderState } from "@/db/enums";
-import type { Standing } from "./schema";
+import type { Standing } from "./schema-standing";
 
 /** What a shot's standing follows from: its hold and its newest version's facts. */
 export interface ShotFacts {

@@ -9,7 +9,7 @@ import {
   type Role,
 } from "@/db/enums";
 import { maximumFrames, type Setup } from "@/render/scene/setup";
-import type { Standing } from "../shots/schema";
+import type { Standing } from "../shots/schema-standing";
 
 const frameNumber = z.coerce
   .number({ error: "A whole frame number." })

@@ -4,7 +4,7 @@ import type { RenderState } from "@/db/enums";
 import { deliveries, deliveryItems, receipts } from "@/db/schema/deliveries";
 import { standingVerdicts, submissions } from "@/db/schema/reviews";
 import { renders, versions } from "@/db/schema/versions";
-import type { Standing } from "../shots/schema";
+import type { Standing } from "../shots/schema-standing";
 import { standingOfVersion } from "../shots/standing";
 
 /** The standing of each version that the condition chooses, the newest or not. */

@@ -3,7 +3,8 @@ import { describe, expect, it } from "vitest";
 import { arc, drawStanding, standingTones, strokeUnit } from "@/components/standing/geometry";
 import { Standing } from "@/components/standing/standing";
 import { StandingGlyph } from "@/components/standing/standing-glyph";
-import { standings, type Standing as StandingName } from "@/lib/shots/schema";
+import { type Standing as StandingName } from "@/lib/shots/schema-standing";
+import { standings } from "@/lib/shots/schema-standing";
 
 // Radii, widths in units of w, and points, read off the page that defines the rings.
 const drawn: Record<StandingName, { strokes: [string, number][]; point?: number }> = {
