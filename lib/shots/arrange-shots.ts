@@ -1,4 +1,4 @@
-import { type ShotLine } from "./schema";
+import type { ShotLine } from "./schema";
 import { standings, type ShotOrder, type Standing } from "./schema-standing";
 
 const asking = new Set<Standing>(["ready", "in review", "returned"]);
